@@ -1,0 +1,6 @@
+export { BadInput } from './numerics/errors'
+export type { Section, MeanLine, Edge, ChordLine } from './shape/section'
+export type { Method, Surface, Polar, PolarPoint } from './polar/polar'
+export type { WingShape, WingStation } from './wing/planform'
+export type { Aircraft, Condition, Job, JobEntry } from './job/job'
+export type { SectionState, Task, TaskResult, PressureResult } from './job/task'
