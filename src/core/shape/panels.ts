@@ -1,0 +1,82 @@
+import { BadInput } from '../numerics/errors'
+import { contourOf, pointAt, type Contour } from './contour'
+import type { Section } from './section'
+
+/** Straight panels round a section: n + 1 nodes on its outline, from the upper trailing edge to the lower. */
+export interface Panels {
+  readonly x: Float64Array
+  readonly y: Float64Array
+}
+
+export const FEWEST_PANELS = 40
+export const MOST_PANELS = 400
+export const DEFAULT_PANELS = 180
+
+/** Softens the cosine clustering at the trailing edge, chords: neighbouring panels differ by about a fifth. */
+const EDGE_SOFTENING = 0.005
+/** The same at the nose, in nose radii, and not below the floor in chords. */
+const NOSE_SOFTENING = 0.5
+const NOSE_SOFTENING_FLOOR = 0.0015
+/** Points at which the panel density is summed along each side. */
+const DENSITY_POINTS = 1200
+
+/**
+ * Nodes by a softened cosine rule in arc length. On each side, with d and e the arc lengths from the
+ * trailing edge and from the nose, the panel density is 1/sqrt((d + d0)(e + e0)): the cosine rule itself
+ * for d0 = e0 = 0. The softening e0 follows the nose radius, so a sharper nose draws more panels, and the
+ * lengths of neighbours change gently. Both sides share the nodes so that the density is continuous.
+ *
+ * Throws BadInput for a count outside 40 to 400 or not whole.
+ */
+export function placePanels(section: Pick<Section, 'x' | 'y'>, count: number = DEFAULT_PANELS): Panels {
+  if (!Number.isInteger(count) || count < FEWEST_PANELS || count > MOST_PANELS) {
+    throw new BadInput(`${count} panels: give a whole number from ${FEWEST_PANELS} to ${MOST_PANELS}`)
+  }
+  const contour = contourOf(section)
+  const { s, share } = panelDensity(contour)
+  const x = new Float64Array(count + 1)
+  const y = new Float64Array(count + 1)
+  const last = share.length - 1
+  for (let i = 0, k = 0; i <= count; i++) {
+    const wanted = (share[last] * i) / count
+    while (k < last - 1 && share[k + 1] < wanted) k++
+    const at = s[k] + ((s[k + 1] - s[k]) * (wanted - share[k])) / (share[k + 1] - share[k])
+    const point = pointAt(contour, at)
+    x[i] = point.x
+    y[i] = point.y
+  }
+  return { x, y }
+}
+
+/** Running integral `share` of the panel density along the arc lengths `s` of both sides. */
+function panelDensity(contour: Contour): { s: Float64Array; share: Float64Array } {
+  const e0 = Math.max(NOSE_SOFTENING * noseRadius(contour), NOSE_SOFTENING_FLOOR)
+  const total = 2 * DENSITY_POINTS
+  const s = new Float64Array(total + 1)
+  const share = new Float64Array(total + 1)
+  const sides = [contour.nose, contour.length - contour.nose]
+  const density = (d: number, e: number): number => 1 / Math.sqrt((d + EDGE_SOFTENING) * (e + e0))
+  let before = density(0, sides[0])
+  for (let k = 1; k <= total; k++) {
+    const length = k <= DENSITY_POINTS ? sides[0] : sides[1]
+    const t = k <= DENSITY_POINTS ? k / DENSITY_POINTS : (total - k) / DENSITY_POINTS
+    const d = length * Math.sin(0.5 * Math.PI * t) ** 2
+    s[k] = k <= DENSITY_POINTS ? d : contour.length - d
+    const here = density(d, length - d)
+    share[k] = share[k - 1] + 0.5 * (before + here) * (s[k] - s[k - 1])
+    before = here
+  }
+  return { s, share }
+}
+
+/** Radius of curvature at the nose, averaged over a short arc so that noise in measured points evens out. */
+export function noseRadius(contour: Contour): number {
+  const reach = 0.003
+  const before = pointAt(contour, contour.nose - reach)
+  const after = pointAt(contour, contour.nose + reach)
+  const turned = Math.atan2(
+    before.dx * after.dy - before.dy * after.dx,
+    before.dx * after.dx + before.dy * after.dy,
+  )
+  return turned > 0 ? (2 * reach) / turned : 1
+}
