@@ -12,9 +12,13 @@ export const FEWEST_PANELS = 40
 export const MOST_PANELS = 400
 export const DEFAULT_PANELS = 180
 
-/** Softens the cosine clustering at the trailing edge, chords: neighbouring panels differ by about a fifth. */
-const EDGE_SOFTENING = 0.005
-/** The same at the nose, in nose radii, and not below the floor in chords. */
+/**
+ * Softens the cosine clustering at the trailing edge: in units of the arc length of the first panel that the
+ * plain cosine rule would lay. With 3 its neighbours' lengths are as 9 to 7 instead of 3 to 1 at any count,
+ * and the edge panels shrink with the square of the count, so errors of the edge fall at second order too.
+ */
+const EDGE_SOFTENING = 9
+/** Softens the clustering at the nose, in nose radii, and not below the floor in chords. */
 const NOSE_SOFTENING = 0.5
 const NOSE_SOFTENING_FLOOR = 0.0015
 /** Points at which the panel density is summed along each side. */
@@ -33,7 +37,7 @@ export function placePanels(section: Pick<Section, 'x' | 'y'>, count: number = D
     throw new BadInput(`${count} panels: give a whole number from ${FEWEST_PANELS} to ${MOST_PANELS}`)
   }
   const contour = contourOf(section)
-  const { s, share } = panelDensity(contour)
+  const { s, share } = panelDensity(contour, count)
   const x = new Float64Array(count + 1)
   const y = new Float64Array(count + 1)
   const last = share.length - 1
@@ -49,13 +53,14 @@ export function placePanels(section: Pick<Section, 'x' | 'y'>, count: number = D
 }
 
 /** Running integral `share` of the panel density along the arc lengths `s` of both sides. */
-function panelDensity(contour: Contour): { s: Float64Array; share: Float64Array } {
+function panelDensity(contour: Contour, count: number): { s: Float64Array; share: Float64Array } {
   const e0 = Math.max(NOSE_SOFTENING * noseRadius(contour), NOSE_SOFTENING_FLOOR)
+  const d0 = (EDGE_SOFTENING * 0.5 * contour.length * Math.PI ** 2) / count ** 2
   const total = 2 * DENSITY_POINTS
   const s = new Float64Array(total + 1)
   const share = new Float64Array(total + 1)
   const sides = [contour.nose, contour.length - contour.nose]
-  const density = (d: number, e: number): number => 1 / Math.sqrt((d + EDGE_SOFTENING) * (e + e0))
+  const density = (d: number, e: number): number => 1 / Math.sqrt((d + d0) * (e + e0))
   let before = density(0, sides[0])
   for (let k = 1; k <= total; k++) {
     const length = k <= DENSITY_POINTS ? sides[0] : sides[1]

@@ -1,0 +1,160 @@
+import { cubicSpline } from '../numerics/spline'
+import type { Panels } from '../shape/panels'
+import { checkMach, compressiblePressure, criticalPressure } from './compressibility'
+import type { PanelFlow } from './vortexPanels'
+
+/** Loads on a section at one angle; coefficients of chord 1, moment about the quarter chord, nose up positive. */
+export interface PanelLoads {
+  /** rad */
+  readonly alpha: number
+  /** From the circulation, with the compressibility correction of the pressures. */
+  readonly liftCoefficient: number
+  readonly liftFromPressure: number
+  readonly momentCoefficient: number
+  /** At the nodes of the panels. */
+  readonly pressureCoefficient: Float64Array
+  /** Where the flow divides: chords of panel length from the upper trailing edge, and the point. */
+  readonly stagnation: { readonly s: number; readonly x: number; readonly y: number }
+  /** What deserves a mark; empty when there is nothing to say. */
+  readonly reason: string
+}
+
+/** Weights of the node pressures in the forces along and across the chord and in the moment. */
+export interface LoadWeights {
+  readonly along: Float64Array
+  readonly across: Float64Array
+  readonly moment: Float64Array
+  /** Weights of the node vorticity in the circulation. */
+  readonly circulation: Float64Array
+}
+
+/** End weights of Gregory's rule of fourth order; Abramowitz and Stegun (1964), section 25.4. */
+const GREGORY = [3 / 8, 7 / 6, 23 / 24] as const
+
+/**
+ * The nodes lie evenly in a smooth parameter (their own number), so the contour integrals of the pressure
+ * are taken in it: slopes of a spline through the nodes and Gregory's end-corrected trapezoidal rule, of
+ * fourth order. On a blunt edge the base carries the pressure of the edge.
+ */
+export function loadWeights({ x, y }: Panels): LoadWeights {
+  const n = x.length - 1
+  const number = Float64Array.from(x, (_, i) => i)
+  const dx = cubicSpline(number, x).slope
+  const dy = cubicSpline(number, y).slope
+  const along = new Float64Array(n + 1)
+  const across = new Float64Array(n + 1)
+  const moment = new Float64Array(n + 1)
+  const circulation = new Float64Array(n + 1)
+  for (let i = 0; i <= n; i++) {
+    const weight = GREGORY[Math.min(i, n - i)] ?? 1
+    along[i] = -weight * dy[i]
+    across[i] = weight * dx[i]
+    moment[i] = -weight * ((x[i] - 0.25) * dx[i] + y[i] * dy[i])
+    const before = i > 0 ? Math.hypot(x[i] - x[i - 1], y[i] - y[i - 1]) : 0
+    const after = i < n ? Math.hypot(x[i + 1] - x[i], y[i + 1] - y[i]) : 0
+    circulation[i] = 0.5 * (before + after)
+  }
+  const gapX = x[0] - x[n]
+  const gapY = y[0] - y[n]
+  const arm = (0.5 * (x[0] + x[n]) - 0.25) * gapX + 0.5 * (y[0] + y[n]) * gapY
+  for (const i of [0, n]) {
+    along[i] -= 0.5 * gapY
+    across[i] += 0.5 * gapX
+    moment[i] -= 0.5 * arm
+  }
+  return { along, across, moment, circulation }
+}
+
+/**
+ * Loads at the angle of attack `alpha` (rad) and the free-stream Mach number `mach`, 0 to 0.5: pressures by
+ * Bernoulli's equation and the rule of von Karman and Tsien, lift and moment from those pressures. The lift
+ * from circulation gets the increment that the correction gives to the pressure lift. Flow that turns sonic
+ * is marked in `reason`. Throws BadInput for a Mach number outside the range.
+ */
+export function panelLoads(flow: PanelFlow, alpha: number, mach: number = 0): PanelLoads {
+  checkMach(mach)
+  const { along, across, weights, panels } = flow
+  const size = along.length
+  const cos = Math.cos(alpha)
+  const sin = Math.sin(alpha)
+  const pressureCoefficient = new Float64Array(size)
+  let circulation = 0
+  let [fx, fy, moment, incompressibleLift, lowest] = [0, 0, 0, 0, 1]
+  for (let i = 0; i < size; i++) {
+    const speed = along[i] * cos + across[i] * sin
+    const plain = 1 - speed * speed
+    const cp = mach === 0 ? plain : compressiblePressure(plain, mach)
+    pressureCoefficient[i] = cp
+    if (cp < lowest) lowest = cp
+    circulation += weights.circulation[i] * speed
+    incompressibleLift += plain * (weights.across[i] * cos - weights.along[i] * sin)
+    fx += cp * weights.along[i]
+    fy += cp * weights.across[i]
+    moment += cp * weights.moment[i]
+  }
+  const liftFromPressure = fy * cos - fx * sin
+  return {
+    alpha,
+    liftCoefficient: 2 * circulation + liftFromPressure - incompressibleLift,
+    liftFromPressure,
+    momentCoefficient: moment,
+    pressureCoefficient,
+    stagnation: stagnationOf(panels, along, across, cos, sin),
+    reason: reasonOf(flow.solved, lowest, mach),
+  }
+}
+
+function reasonOf(solved: boolean, lowest: number, mach: number): string {
+  if (!solved) return 'the panel equations have no solution for this outline'
+  return lowest < criticalPressure(mach) ? 'the flow turns sonic on the surface' : ''
+}
+
+/** First place from the upper edge where the surface speed changes sign; the leading node pair decides. */
+function stagnationOf(
+  { x, y }: Panels,
+  along: Float64Array,
+  across: Float64Array,
+  cos: number,
+  sin: number,
+): { s: number; x: number; y: number } {
+  let s = 0
+  const last = x.length - 1
+  for (let i = 0; i < last; i++) {
+    const here = along[i] * cos + across[i] * sin
+    const next = along[i + 1] * cos + across[i + 1] * sin
+    const h = Math.hypot(x[i + 1] - x[i], y[i + 1] - y[i])
+    if (here > 0 && next <= 0) {
+      const t = here / (here - next)
+      return { s: s + t * h, x: x[i] + t * (x[i + 1] - x[i]), y: y[i] + t * (y[i + 1] - y[i]) }
+    }
+    s += h
+  }
+  return { s, x: x[last], y: y[last] }
+}
+
+/**
+ * Angle of attack (rad) at which the section has the lift coefficient `lift` at `mach`; null when the
+ * potential flow reaches no such lift. Closed form at Mach 0, where lift is linear in the sine and cosine of
+ * the angle; secant steps from there otherwise.
+ */
+export function alphaForLift(flow: PanelFlow, lift: number, mach: number = 0): number | null {
+  checkMach(mach)
+  const atZero = panelLoads(flow, 0).liftCoefficient
+  const atRight = panelLoads(flow, Math.PI / 2).liftCoefficient
+  const size = Math.hypot(atZero, atRight)
+  const closed = (wanted: number): number => Math.asin(wanted / size) - Math.atan2(atZero, atRight)
+  if (!(size > 0) || Math.abs(lift) > size) return null
+  let alpha = closed(lift)
+  if (mach === 0) return alpha
+  let before = closed(lift * Math.sqrt(1 - mach * mach))
+  let errorBefore = panelLoads(flow, before, mach).liftCoefficient - lift
+  for (let step = 0; step < 50; step++) {
+    const error = panelLoads(flow, alpha, mach).liftCoefficient - lift
+    if (Math.abs(error) < 1e-10) return alpha
+    if (error === errorBefore) return null
+    const next = alpha - (error * (alpha - before)) / (error - errorBefore)
+    ;[before, errorBefore, alpha] = [alpha, error, next]
+    if (!(Math.abs(alpha) < Math.PI / 2)) return null
+  }
+  return null
+}

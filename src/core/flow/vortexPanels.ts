@@ -1,0 +1,81 @@
+import { factorInPlace, solveInPlace } from '../numerics/denseSolve'
+import type { Panels } from '../shape/panels'
+import { fillVortexInfluence } from './panelInfluence'
+import { loadWeights, type LoadWeights } from './panelLoads'
+import { gapInfluence, trailingEdgeOf, type TrailingEdge } from './trailingEdge'
+
+/**
+ * The flow round a section at every angle: vorticity at the n + 1 nodes for a unit stream along the chord
+ * (angle 0) and across it (90 deg). At angle a it is `along` cos a + `across` sin a. Clockwise positive;
+ * its size is the surface speed, and it is positive where the flow runs towards the upper trailing edge.
+ */
+export interface PanelFlow {
+  readonly panels: Panels
+  readonly edge: TrailingEdge
+  readonly along: Float64Array
+  readonly across: Float64Array
+  readonly weights: LoadWeights
+  /** False when the equations had no solution; the vorticity is then zero. */
+  readonly solved: boolean
+}
+
+/**
+ * Solves the potential flow round a section with vorticity that varies linearly along straight panels.
+ *
+ * The outline is a streamline: the stream function has one unknown value at all nodes. The flow leaves the
+ * trailing edge smoothly: the vorticity of its two sides is equal and opposite. On a blunt edge the gap
+ * panel carries the jump to the fluid behind it. On a sharp edge the first and last node coincide and give
+ * the same equation; in its place the edge speed continues the mean speed of both sides (see edgeRow).
+ * The matrix does not depend on the angle: one factorisation serves all.
+ * Source: Katz and Plotkin, Low-Speed Aerodynamics (2001), sections 11.3 to 11.5.
+ */
+export function solvePanels(panels: Panels): PanelFlow {
+  const n = panels.x.length - 1
+  const size = n + 1
+  const edge = trailingEdgeOf(panels)
+  const matrix = new Float64Array(size * size)
+  fillVortexInfluence(panels, matrix, size)
+  const along = new Float64Array(size)
+  const across = new Float64Array(size)
+  for (let i = 0; i <= n; i++) {
+    const row = i * size
+    const gap = edge.sharp ? 0 : gapInfluence(panels, edge, panels.x[i], panels.y[i])
+    matrix[row] += gap - matrix[row + n]
+    matrix[row + n] = -1
+    along[i] = -panels.y[i]
+    across[i] = panels.x[i]
+  }
+  if (edge.sharp) {
+    matrix.fill(0, n * size)
+    edgeRow(panels, matrix.subarray(n * size))
+    along[n] = across[n] = 0
+  }
+  const weights = loadWeights(panels)
+  const factors = factorInPlace(matrix, size)
+  if (factors.singular)
+    return { panels, edge, weights, along: along.fill(0), across: across.fill(0), solved: false }
+  for (const rhs of [along, across]) {
+    solveInPlace(factors, rhs)
+    rhs[n] = -rhs[0]
+  }
+  return { panels, edge, weights, along, across, solved: true }
+}
+
+/**
+ * The last equation of a sharp edge. The mean speed of the two sides, v(d) = (upper - lower) / 2 at the
+ * distance d from the edge, is smooth even for a cusp, where the speeds themselves are fixed only by the
+ * difference of two nearly equal equations. The edge speed is its straight continuation through the next
+ * two pairs of nodes; a parabola through three changes no lift by more than 1e-6.
+ */
+function edgeRow({ x, y }: Panels, row: Float64Array): void {
+  const n = x.length - 1
+  const distance = (k: number): number =>
+    0.5 * (Math.hypot(x[k] - x[0], y[k] - y[0]) + Math.hypot(x[n - k] - x[n], y[n - k] - y[n]))
+  const near = distance(1)
+  const far = distance(2)
+  row[0] = 1
+  row[1] = (-0.5 * far) / (far - near)
+  row[2] = (0.5 * near) / (far - near)
+  row[n - 1] = -row[1]
+  row[n - 2] = -row[2]
+}
