@@ -1,41 +1,28 @@
+import { BadInput } from '../numerics/errors'
+import type { Polar } from '../polar/polar'
+import type { Operating, PressureResult, SectionState } from '../polar/state'
+import { pressureAt, sweep } from '../polar/sweep'
 import type { Section } from '../shape/section'
-import type { Method, Polar, Surface } from '../polar/polar'
 
-/** The state at which one section is computed. Plain data: it crosses to a worker and names a cached result. */
-export interface SectionState {
-  readonly method: Method
-  /** null unless viscous */
-  readonly reynolds: number | null
-  readonly mach: number
-  readonly surface: Surface
-  readonly amplification: number | null
-  readonly tripUpper: number
-  readonly tripLower: number
-  /** rad */
-  readonly flap: number
-  readonly panels: number
-}
-
-/** One piece of work for a worker. */
+/** One piece of work for a worker: plain data. */
 export type Task =
   | { readonly kind: 'polar'; readonly section: Section; readonly state: SectionState; readonly alphas: readonly number[] }
-  | { readonly kind: 'pressure'; readonly section: Section; readonly state: SectionState; readonly at: { readonly alpha: number } | { readonly lift: number } }
+  | { readonly kind: 'pressure'; readonly section: Section; readonly state: SectionState; readonly at: Operating }
 
-/** Surface pressure of one section at one angle, from the upper trailing edge round to the lower one. */
-export interface PressureResult {
-  readonly method: Method
-  /** rad */
-  readonly alpha: number
-  readonly liftCoefficient: number
-  readonly momentCoefficient: number
-  readonly x: Float64Array
-  readonly y: Float64Array
-  readonly pressureCoefficient: Float64Array
-  readonly converged: boolean
-  readonly reason: string
-}
-
-/** What came of a task. */
+/** What came of a task. A failed one says why in a plain sentence. */
 export type TaskResult =
   | { readonly kind: 'polar'; readonly polar: Polar }
   | { readonly kind: 'pressure'; readonly pressure: PressureResult }
+  | { readonly kind: 'failed'; readonly reason: string }
+
+/** Runs one task to its end. Input that makes no sense comes back as a failed result, not as an exception. */
+export function runTask(task: Task): TaskResult {
+  try {
+    return task.kind === 'polar'
+      ? { kind: 'polar', polar: sweep(task.section, task.state, task.alphas) }
+      : { kind: 'pressure', pressure: pressureAt(task.section, task.state, task.at) }
+  } catch (error) {
+    if (error instanceof BadInput) return { kind: 'failed', reason: error.message }
+    throw error
+  }
+}

@@ -1,5 +1,5 @@
 import { alphaForLift, panelLoads, type PanelLoads } from '../flow/panelLoads'
-import { thinAirfoil } from '../flow/thinAirfoil'
+import { thinAirfoil, thinLift } from '../flow/thinAirfoil'
 import { solvePanels } from '../flow/vortexPanels'
 import { checkMach } from '../flow/compressibility'
 import { BadInput } from '../numerics/errors'
@@ -10,8 +10,6 @@ import type { Operating, PressureResult, SectionState } from './state'
 
 /** Fields that a method without a boundary layer leaves empty. */
 const NO_BOUNDARY_LAYER = { dragCoefficient: null, transitionUpper: null, transitionLower: null } as const
-/** Lift slope of thin-airfoil theory, 1/rad. */
-const THIN_SLOPE = 2 * Math.PI
 
 /**
  * An angle sweep of one section: one point for each of `alphas` (rad), in their order. `thin` is always
@@ -47,12 +45,12 @@ function pointsOf(section: Section, state: SectionState, alphas: readonly number
 
 /** Lift 2 pi (alpha - zero-lift angle) and the constant moment of thin-airfoil theory. */
 function thinPoints(section: Section, alphas: readonly number[]): readonly PolarPoint[] {
-  const { zeroLiftAngle, momentQuarterChord } = thinAirfoil(section)
+  const thin = thinAirfoil(section)
   return alphas.map((alpha) => ({
     ...NO_BOUNDARY_LAYER,
     alpha,
-    liftCoefficient: THIN_SLOPE * (alpha - zeroLiftAngle),
-    momentCoefficient: momentQuarterChord,
+    liftCoefficient: thinLift(thin, alpha),
+    momentCoefficient: thin.momentQuarterChord,
     converged: true,
     reason: '',
   }))
