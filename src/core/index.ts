@@ -15,3 +15,26 @@ export { panelLoads, alphaForLift } from './flow/panelLoads'
 export type { PanelLoads } from './flow/panelLoads'
 export { GREATEST_MACH, criticalPressure } from './flow/compressibility'
 export { sweep, pressureAt } from './polar/sweep'
+export { nacaSection, isNacaDesignation } from './shape/naca'
+export { measure, depthAt } from './shape/measures'
+export type { Measures } from './shape/measures'
+export { waviness } from './shape/waviness'
+export type { Waviness, Wave } from './shape/waviness'
+export { thinAirfoil, thinLift, centreOfPressure } from './flow/thinAirfoil'
+export type { ThinAirfoil } from './flow/thinAirfoil'
+export { taperedStations, checkStations, meanAerodynamicChord, stationAt } from './wing/planform'
+export { flightState, reynoldsNumber, whyUnflyable } from './flight/conditions'
+export type { FlightState, FlightInput } from './flight/conditions'
+export type { WingAtCondition, StationState } from './wing/wing'
+export { nextTasks } from './job/nextTasks'
+export { assemble } from './job/assemble'
+export { taskKey } from './job/taskKey'
+export { runTask } from './job/task'
+export type {
+  Comparison,
+  ComparedEntry,
+  EntryAtCondition,
+  EntryPolar,
+  PaneState,
+  SectionFacts,
+} from './job/comparison'

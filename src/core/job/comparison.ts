@@ -3,6 +3,7 @@ import type { Waviness } from '../shape/waviness'
 import type { Section } from '../shape/section'
 import type { ThinAirfoil } from '../flow/thinAirfoil'
 import type { Polar, Method } from '../polar/polar'
+import type { WingShape } from '../wing/planform'
 import type { WingAtCondition } from '../wing/wing'
 import type { Condition } from './job'
 import type { PressureResult } from '../polar/state'
@@ -10,6 +11,9 @@ import type { PressureResult } from '../polar/state'
 /** What is known of the shortlist on the wing at each condition: made from any subset of the results. */
 export interface Comparison {
   readonly method: Method
+  readonly wing: WingShape
+  /** Distance of the shown station from the centreline, m. */
+  readonly stationY: number
   readonly conditions: readonly Condition[]
   readonly entries: readonly ComparedEntry[]
 }
@@ -18,6 +22,8 @@ export interface Comparison {
 export interface ComparedEntry {
   /** As it stands in the section column of files. */
   readonly name: string
+  readonly rootName: string
+  readonly tipName: string
   /** Why nothing can be computed for it; null when it can. */
   readonly fault: string | null
   readonly root: SectionFacts | null
@@ -57,6 +63,8 @@ export interface EntryAtCondition {
 export interface PaneState {
   /** m from the centreline */
   readonly stationY: number
+  /** The section there: between root and tip by straight lines. */
+  readonly section: Section | null
   readonly liftCoefficient: number
   readonly reynolds: number
   readonly mach: number

@@ -41,6 +41,9 @@ export interface Condition {
 /** One entry of the shortlist, read and ready; `fault` says why it cannot be computed. */
 export interface JobEntry {
   readonly name: string
+  /** What the root and the tip are called in files: for a one-section wing, twice the name. */
+  readonly rootName: string
+  readonly tipName: string
   readonly root: Section | null
   readonly tip: Section | null
   readonly tripUpper: number

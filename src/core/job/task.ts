@@ -6,8 +6,18 @@ import type { Section } from '../shape/section'
 
 /** One piece of work for a worker: plain data. */
 export type Task =
-  | { readonly kind: 'polar'; readonly section: Section; readonly state: SectionState; readonly alphas: readonly number[] }
-  | { readonly kind: 'pressure'; readonly section: Section; readonly state: SectionState; readonly at: Operating }
+  | {
+      readonly kind: 'polar'
+      readonly section: Section
+      readonly state: SectionState
+      readonly alphas: readonly number[]
+    }
+  | {
+      readonly kind: 'pressure'
+      readonly section: Section
+      readonly state: SectionState
+      readonly at: Operating
+    }
 
 /** What came of a task. A failed one says why in a plain sentence. */
 export type TaskResult =

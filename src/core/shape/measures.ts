@@ -75,7 +75,9 @@ function largest(f: (x: number) => number): [value: number, at: number] {
 function edgeAngle(contour: Contour): number {
   const upper = direction(contour, EDGE_STRETCH, 0)
   const lower = direction(contour, contour.length - EDGE_STRETCH, contour.length)
-  return Math.abs(Math.atan2(upper[0] * lower[1] - upper[1] * lower[0], upper[0] * lower[0] + upper[1] * lower[1]))
+  return Math.abs(
+    Math.atan2(upper[0] * lower[1] - upper[1] * lower[0], upper[0] * lower[0] + upper[1] * lower[1]),
+  )
 }
 
 function direction(contour: Contour, from: number, to: number): [number, number] {

@@ -84,12 +84,7 @@ function fiveDigitLine(digits: string): MeanLine {
     return {
       joint: r,
       front: [0, k * (3 * r * r - fall), -3 * k * r, k],
-      rear: [
-        k * r ** 3 * (1 - ratio),
-        k * (3 * ratio * r * r - fall),
-        -3 * k * ratio * r,
-        k * ratio,
-      ],
+      rear: [k * r ** 3 * (1 - ratio), k * (3 * ratio * r * r - fall), -3 * k * ratio * r, k * ratio],
     }
   }
   throw new BadInput(
@@ -105,8 +100,7 @@ function outline(line: MeanLine, thickness: number, edge: Edge): { x: Float64Arr
   for (let i = 0; i <= n; i++) {
     const root = Math.sin((Math.PI * i) / (2 * n)) // square root of the station
     const at = i === n ? 1 : root * root
-    const half =
-      5 * thickness * (0.2969 * root + at * (-0.126 + at * (-0.3516 + at * (0.2843 + at * last))))
+    const half = 5 * thickness * (0.2969 * root + at * (-0.126 + at * (-0.3516 + at * (0.2843 + at * last))))
     const camber = meanLineAt(line, at)
     const across = i === n && edge === 'closed' ? 0 : half
     const lean = Math.atan(camber.slope)

@@ -44,7 +44,9 @@ export function waviness(section: Section): Waviness {
     departures.forEach((value, k) => {
       sum += value * value
       count++
-      const peak = departures.slice(Math.max(0, k - 4), k + 5).every((other) => Math.abs(other) <= Math.abs(value))
+      const peak = departures
+        .slice(Math.max(0, k - 4), k + 5)
+        .every((other) => Math.abs(other) <= Math.abs(value))
       if (peak && Math.abs(value) > NOTABLE) waves.push({ side, at: places[k], height: value })
     })
   }
@@ -62,12 +64,17 @@ function departure(heights: readonly number[], k: number): number {
 /** Smoothing weights of a quartic over 2 REACH + 1 equal steps; Savitzky and Golay (1964), closed form. */
 const SMOOTHING: readonly number[] = (() => {
   const m = REACH
-  const scale =
-    (4 * (2 * m + 5) * (2 * m + 3) * (2 * m + 1) * (2 * m - 1) * (2 * m - 3)) / 15
+  const scale = (4 * (2 * m + 5) * (2 * m + 3) * (2 * m + 1) * (2 * m - 1) * (2 * m - 3)) / 15
   return Array.from({ length: 2 * m + 1 }, (_, j) => {
     const i = j - m
     const top =
-      15 * m ** 4 + 30 * m ** 3 - 35 * m ** 2 - 50 * m + 12 - 35 * (2 * m ** 2 + 2 * m - 3) * i ** 2 + 63 * i ** 4
+      15 * m ** 4 +
+      30 * m ** 3 -
+      35 * m ** 2 -
+      50 * m +
+      12 -
+      35 * (2 * m ** 2 + 2 * m - 3) * i ** 2 +
+      63 * i ** 4
     return top / scale
   })
 })()

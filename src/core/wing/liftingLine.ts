@@ -73,7 +73,10 @@ export function solveLiftingLine(input: LiftingLineInput, terms: number = TERMS)
   return { input, perAngle, atZero }
 }
 
-function* quadrature({ span, breaks }: LiftingLineInput): Generator<readonly [theta: number, weight: number]> {
+function* quadrature({
+  span,
+  breaks,
+}: LiftingLineInput): Generator<readonly [theta: number, weight: number]> {
   for (let k = 0; k + 1 < breaks.length; k++) {
     const from = Math.acos(Math.min(breaks[k + 1] / (0.5 * span), 1))
     const to = Math.acos(breaks[k] / (0.5 * span))

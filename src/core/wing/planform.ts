@@ -40,7 +40,8 @@ const AGREEMENT = 1e-3
 export function taperedStations(area: number, span: number, taper: number, washout: number): WingStation[] {
   if (!(area > 0)) throw new BadInput(`wing area ${area} m2: give more than 0`)
   if (!(span > 0)) throw new BadInput(`span ${span} m: give more than 0`)
-  if (!(taper > 0)) throw new BadInput(`taper ratio ${taper}: give more than 0; a tip chord of zero has no section`)
+  if (!(taper > 0))
+    throw new BadInput(`taper ratio ${taper}: give more than 0; a tip chord of zero has no section`)
   const root = (2 * area) / (span * (1 + taper))
   return [
     { y: 0, chord: root, twist: 0 },
@@ -56,7 +57,8 @@ export function checkStations(stations: readonly WingStation[], area: number, sp
   if (stations.length < 2) throw new BadInput('wing stations: give at least two, the root and the tip')
   if (stations[0].y !== 0) throw new BadInput(`wing station 1: y ${stations[0].y} m; the first lies at 0`)
   stations.forEach((station, i) => {
-    if (!(station.chord > 0)) throw new BadInput(`wing station ${i + 1}: chord ${station.chord} m; give more than 0`)
+    if (!(station.chord > 0))
+      throw new BadInput(`wing station ${i + 1}: chord ${station.chord} m; give more than 0`)
     if (i > 0 && !(station.y > stations[i - 1].y)) {
       throw new BadInput(`wing station ${i + 1}: y ${station.y} m does not lie outside the one before it`)
     }

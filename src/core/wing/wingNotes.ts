@@ -26,9 +26,15 @@ export function wingNotes(wing: NotedWing): string[] {
       Math.abs(wing.sweepQuarterChord) > NOTED_SWEEP,
       `sweep of ${degrees.toFixed(0)} deg: only the section slope is corrected; the outboard shift of lift is not computed`,
     ],
-    [wing.mach > FASTEST, `Mach ${wing.mach.toFixed(2)} is above ${FASTEST}: the compressibility rule does not reach it`],
+    [
+      wing.mach > FASTEST,
+      `Mach ${wing.mach.toFixed(2)} is above ${FASTEST}: the compressibility rule does not reach it`,
+    ],
     [wing.reynoldsAtTip < LOWEST_REYNOLDS, 'the Reynolds number falls below 50 000 near the tip'],
-    [wing.lacksCentreOfGravity, 'no centre of gravity given: it is taken at the aerodynamic centre of the wing'],
+    [
+      wing.lacksCentreOfGravity,
+      'no centre of gravity given: it is taken at the aerodynamic centre of the wing',
+    ],
     [wing.lacksTailArm, 'no tail arm given: the wing carries the whole load'],
   ]
   return notes.filter(([holds]) => holds).map(([, words]) => words)
