@@ -1,0 +1,1 @@
+export { serveWindow, type Served } from './server'
