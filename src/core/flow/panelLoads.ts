@@ -132,6 +132,9 @@ function stagnationOf(
   return { s, x: x[last], y: y[last] }
 }
 
+/** First step of the secant search for a lift, rad. */
+const FIRST_STEP = 0.01
+
 /**
  * Angle of attack (rad) at which the section has the lift coefficient `lift` at `mach`; null when the
  * potential flow reaches no such lift. Closed form at Mach 0, where lift is linear in the sine and cosine of
@@ -146,7 +149,7 @@ export function alphaForLift(flow: PanelFlow, lift: number, mach: number = 0): n
   if (!(size > 0) || Math.abs(lift) > size) return null
   let alpha = closed(lift)
   if (mach === 0) return alpha
-  let before = closed(lift * Math.sqrt(1 - mach * mach))
+  let before = alpha - FIRST_STEP
   let errorBefore = panelLoads(flow, before, mach).liftCoefficient - lift
   for (let step = 0; step < 50; step++) {
     const error = panelLoads(flow, alpha, mach).liftCoefficient - lift

@@ -18,17 +18,23 @@ export const DEFAULT_PANELS = 180
  * and the edge panels shrink with the square of the count, so errors of the edge fall at second order too.
  */
 const EDGE_SOFTENING = 9
-/** Softens the clustering at the nose, in nose radii, and not below the floor in chords. */
-const NOSE_SOFTENING = 0.5
-const NOSE_SOFTENING_FLOOR = 0.0015
+/**
+ * The nose: its radius softens the cosine clustering and draws further panels, NOSE_SHARE / (e + half the
+ * radius), so that neighbours grow by a steady factor away from it. More would coarsen the rest: with 0.1 the
+ * errors of nose and rest are alike on sections from 4 to 24 % thick.
+ */
+const NOSE_SHARE = 0.1
+/** Least nose radius that is resolved, chords; sharper noses would need more panels than there are. */
+const LEAST_NOSE_RADIUS = 0.001
 /** Points at which the panel density is summed along each side. */
 const DENSITY_POINTS = 1200
 
 /**
  * Nodes by a softened cosine rule in arc length. On each side, with d and e the arc lengths from the
- * trailing edge and from the nose, the panel density is 1/sqrt((d + d0)(e + e0)): the cosine rule itself
- * for d0 = e0 = 0. The softening e0 follows the nose radius, so a sharper nose draws more panels, and the
- * lengths of neighbours change gently. Both sides share the nodes so that the density is continuous.
+ * trailing edge and from the nose, the panel density is 1/sqrt((d + d0)(e + r)) + NOSE_SHARE/(e + r/2): the
+ * cosine rule itself for d0 = r = 0 and without the last term. r is the nose radius, so a sharper nose draws
+ * more panels, and the lengths of neighbours change gently. Both sides share the nodes so that the density
+ * is continuous.
  *
  * Throws BadInput for a count outside 40 to 400 or not whole.
  */
@@ -54,13 +60,14 @@ export function placePanels(section: Pick<Section, 'x' | 'y'>, count: number = D
 
 /** Running integral `share` of the panel density along the arc lengths `s` of both sides. */
 function panelDensity(contour: Contour, count: number): { s: Float64Array; share: Float64Array } {
-  const e0 = Math.max(NOSE_SOFTENING * noseRadius(contour), NOSE_SOFTENING_FLOOR)
+  const r = Math.max(noseRadius(contour), LEAST_NOSE_RADIUS)
   const d0 = (EDGE_SOFTENING * 0.5 * contour.length * Math.PI ** 2) / count ** 2
   const total = 2 * DENSITY_POINTS
   const s = new Float64Array(total + 1)
   const share = new Float64Array(total + 1)
   const sides = [contour.nose, contour.length - contour.nose]
-  const density = (d: number, e: number): number => 1 / Math.sqrt((d + d0) * (e + e0))
+  const density = (d: number, e: number): number =>
+    1 / Math.sqrt((d + d0) * (e + r)) + NOSE_SHARE / (e + 0.5 * r)
   let before = density(0, sides[0])
   for (let k = 1; k <= total; k++) {
     const length = k <= DENSITY_POINTS ? sides[0] : sides[1]
