@@ -38,3 +38,5 @@ export type {
   PaneState,
   SectionFacts,
 } from './job/comparison'
+export { sectionFromPoints } from './shape/normalise'
+export type { RawOutline, Understood } from './shape/normalise'
