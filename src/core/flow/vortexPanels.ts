@@ -1,7 +1,7 @@
 import { factorInPlace, solveInPlace } from '../numerics/denseSolve'
 import type { Panels } from '../shape/panels'
+import { loadWeights, type LoadWeights } from './loadWeights'
 import { fillVortexInfluence } from './panelInfluence'
-import { loadWeights, type LoadWeights } from './panelLoads'
 import { gapInfluence, trailingEdgeOf, type TrailingEdge } from './trailingEdge'
 
 /**
@@ -27,6 +27,21 @@ export interface PanelFlow {
  * panel carries the jump to the fluid behind it. On a sharp edge the first and last node coincide and give
  * the same equation; in its place the edge speed continues the mean speed of both sides (see edgeRow).
  * The matrix does not depend on the angle: one factorisation serves all.
+ *
+ * Errors fall with the square of the panel count (chords of a curve, vorticity linear on them). At 4 deg on
+ * panels of placePanels, against exact flows:
+ *
+ *   panels                60       90      120      180      240      360   order    60    90 .. 360
+ *   c_l 10^4  NACA 0012  -7.5     -3.4     -1.9    -0.85    -0.47    -0.21          1.95  to  2.05
+ *             NACA 4412 -37.7    -16.9     -9.5    -4.1     -2.3     -1.0           1.98  to  2.07
+ *             J3        -55.5    -25.9    -14.9    -6.8     -3.9     -1.7           1.88  to  1.97
+ *   c_m 10^4  NACA 0012   1.8      0.89     0.52    0.24     0.13     0.06          1.77  to  2.09
+ *             NACA 4412   4.9      2.4      1.4     0.62     0.35     0.15          1.81  to  2.04
+ *             J3          9.4      4.7      2.8     1.3      0.77     0.35          1.73  to  1.91
+ *
+ * J3 is a cambered cusp (Joukowski, 12 % thick, 4 % camber). The moment starts below second order because the
+ * error of the nose, which counts little in the lift, has not yet settled at 60 panels.
+ *
  * Source: Katz and Plotkin, Low-Speed Aerodynamics (2001), sections 11.3 to 11.5.
  */
 export function solvePanels(panels: Panels): PanelFlow {
@@ -50,10 +65,11 @@ export function solvePanels(panels: Panels): PanelFlow {
     edgeRow(panels, matrix.subarray(n * size))
     along[n] = across[n] = 0
   }
-  const weights = loadWeights(panels)
+  const weights = loadWeights(panels, edge)
   const factors = factorInPlace(matrix, size)
-  if (factors.singular)
+  if (factors.singular) {
     return { panels, edge, weights, along: along.fill(0), across: across.fill(0), solved: false }
+  }
   for (const rhs of [along, across]) {
     solveInPlace(factors, rhs)
     rhs[n] = -rhs[0]
