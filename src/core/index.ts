@@ -40,3 +40,7 @@ export type {
 } from './job/comparison'
 export { sectionFromPoints } from './shape/normalise'
 export type { RawOutline, Understood } from './shape/normalise'
+export { criticalAmplification } from './flight/turbulence'
+export { FIGURES } from './decision/figures'
+export type { Figure, FigureScope } from './decision/figures'
+export { localLiftAt } from './wing/wing'

@@ -30,7 +30,10 @@ export function readSection(
   const found = findOutline(rows, file)
   const name = rows.title ?? file.replace(/^.*[/\\]/, '').replace(/\.[a-z0-9]+$/i, '')
   try {
-    const { section, understood } = sectionFromPoints(found.raw, { name, chordLine: options.chordLine ?? null })
+    const { section, understood } = sectionFromPoints(found.raw, {
+      name,
+      chordLine: options.chordLine ?? null,
+    })
     const decimals = rows.decimalComma ? ['decimal commas'] : []
     const report = [...decimals, ...found.assumed, ...sentences(understood)]
     const warnings = [...found.warnings, ...warningsOf(understood), ...waves(section)]
@@ -45,16 +48,24 @@ const degrees = (angle: number): string => ((angle * 180) / Math.PI).toFixed(2)
 
 function sentences(found: Understood): string[] {
   const list = [`${found.points} points`]
-  if (found.dropped > 0) list.push(`${found.dropped} repeated ${found.dropped === 1 ? 'point' : 'points'} left out`)
+  if (found.dropped > 0)
+    list.push(`${found.dropped} repeated ${found.dropped === 1 ? 'point' : 'points'} left out`)
   if (found.restarted) list.push('the loop did not begin at its trailing edge and was put in order')
   if (found.reversed) list.push('the order was reversed')
   if (found.exchanged) list.push('the first list lies below the second and was taken as the lower side')
-  if (Math.abs(found.chord - 1) > 1e-6) list.push(`scaled from a chord of ${Number(found.chord.toPrecision(6))}`)
+  if (Math.abs(found.chord - 1) > 1e-6)
+    list.push(`scaled from a chord of ${Number(found.chord.toPrecision(6))}`)
   if (found.turned) list.push(`turned by ${degrees(-found.longestChordAngle)} deg onto its longest chord`)
   else if (Math.abs(found.longestChordAngle) > 1e-5) {
-    list.push(`its longest chord lies ${degrees(found.longestChordAngle)} deg off the axis of the file, which is kept`)
+    list.push(
+      `its longest chord lies ${degrees(found.longestChordAngle)} deg off the axis of the file, which is kept`,
+    )
   }
-  list.push(found.edgeGap < 1e-6 ? 'closed trailing edge' : `trailing edge ${(100 * found.edgeGap).toFixed(2)} % thick`)
+  list.push(
+    found.edgeGap < 1e-6
+      ? 'closed trailing edge'
+      : `trailing edge ${(100 * found.edgeGap).toFixed(2)} % thick`,
+  )
   return list
 }
 

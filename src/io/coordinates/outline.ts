@@ -21,7 +21,12 @@ export function findOutline(rows: Rows, file: string): FoundOutline {
   const blocks = withoutCounts(rows, assumed)
   const all = blocks.flat()
   if (all.length === 0) {
-    throw new FileProblem(file, null, 'there are no coordinates', 'give x and y of the outline, a point a line')
+    throw new FileProblem(
+      file,
+      null,
+      'there are no coordinates',
+      'give x and y of the outline, a point a line',
+    )
   }
   const short = all.find((row) => row.values.length < 2)
   if (short !== undefined) {
@@ -35,7 +40,12 @@ export function findOutline(rows: Rows, file: string): FoundOutline {
   const [ix, iy] = columns(rows, all, assumed, warnings)
   const missing = all.find((row) => row.values.length <= Math.max(ix, iy))
   if (missing !== undefined) {
-    throw new FileProblem(file, missing.line, 'a column is missing', 'give as many numbers as the other lines')
+    throw new FileProblem(
+      file,
+      missing.line,
+      'a column is missing',
+      'give as many numbers as the other lines',
+    )
   }
   const lists = blocks.map((block) => block.map((row): Point => [row.values[ix]!, row.values[iy]!]))
   return { raw: loopOrSides(lists, assumed, warnings), assumed, warnings }
@@ -47,14 +57,18 @@ function withoutCounts(rows: Rows, assumed: string[]): Row[][] {
   const [first, ...rest] = rows.blocks
   if (first === undefined) return []
   const [a, b] = first[0]!.values
-  const whole = (value: number | undefined): value is number => value !== undefined && value > 2 && value % 1 === 0
+  const whole = (value: number | undefined): value is number =>
+    value !== undefined && value > 2 && value % 1 === 0
   if (first[0]!.values.length === 2 && whole(a) && whole(b) && a + b === total - 1) {
     assumed.push(`two lists of ${a} and ${b} points, as the count says`)
     const all = [...first.slice(1), ...rest.flat()]
     return [all.slice(0, a), all.slice(a)]
   }
   const isCount = (block: readonly Row[]): boolean =>
-    block[0]!.values.length === 1 && whole(block[0]!.values[0]) && block.length > 1 && block[1]!.values.length > 1
+    block[0]!.values.length === 1 &&
+    whole(block[0]!.values[0]) &&
+    block.length > 1 &&
+    block[1]!.values.length > 1
   const blocks = rows.blocks.map((block) => [...block])
   const counted = blocks.filter(isCount)
   if (counted.length > 0) assumed.push('the number before a list was read as its count of points')

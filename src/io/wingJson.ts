@@ -1,0 +1,42 @@
+import type { Comparison, ComparedEntry, EntryAtCondition } from '../core'
+import { degrees } from './csv'
+
+/** The wing JSON: every entry at every condition; fields without a value are null, with a note. */
+export function wingJson(comparison: Comparison): string {
+  const wings = comparison.entries.map((entry) => ({
+    root: entry.rootName,
+    tip: entry.tipName,
+    conditions: entry.conditions.map((state, i) => conditionFields(comparison, entry, state, i)),
+  }))
+  return `${JSON.stringify({ wings }, (_, value: unknown) => (value === 0 ? 0 : value), 2)}\n`
+}
+
+function conditionFields(comparison: Comparison, entry: ComparedEntry, state: EntryAtCondition, i: number) {
+  const { wing } = state
+  return {
+    name: comparison.conditions[i]!.name,
+    density_kg_m3: wing?.density ?? null,
+    dynamic_pressure_Pa: wing?.dynamicPressure ?? null,
+    wing_loading_kg_m2: wing?.wingLoadingMass ?? comparison.conditions[i]!.mass / comparison.wing.area,
+    lift_coefficient: wing?.liftCoefficient ?? null,
+    reynolds: wing?.reynolds ?? null,
+    mach: wing?.mach ?? null,
+    alpha_deg: wing === null ? null : degrees(wing.alpha),
+    lift_slope_per_rad: wing?.liftSlope ?? null,
+    span_efficiency: wing?.spanEfficiency ?? null,
+    induced_drag_coefficient: wing?.inducedDragCoefficient ?? null,
+    induced_drag_N: wing?.inducedDrag ?? null,
+    tail_load_N: wing?.tailLoad ?? null,
+    root_bending_moment_N_m: wing?.rootBendingMoment ?? null,
+    stations: (wing?.stations ?? []).map((station) => ({
+      y_m: station.y,
+      chord_m: station.chord,
+      twist_deg: degrees(station.twist),
+      lift_coefficient: station.liftCoefficient,
+      reynolds: station.reynolds,
+      induced_angle_deg: degrees(station.inducedAngle),
+    })),
+    ...(state.notes.length > 0 ? { note: state.notes.join('; ') } : {}),
+    ...(entry.fault === null ? {} : { fault: entry.fault }),
+  }
+}
