@@ -11,8 +11,8 @@ const liftTolerance = (lift: number): number => Math.max(0.003 * Math.abs(lift),
 const MOMENT_TOLERANCE = 0.0015
 const PRESSURE_TOLERANCE = 0.05
 /** Errors of second order leave this much after Richardson's extrapolation from 180 and 360 panels. */
-const EXTRAPOLATED_MOMENT = 5e-5
-const EXTRAPOLATED_LIFT = 1e-4
+const EXTRAPOLATED_MOMENT = 1e-5
+const EXTRAPOLATED_LIFT = 2e-5
 
 const solved = (panels: Panels, alphaDeg: number): PanelLoads =>
   panelLoads(solvePanels(panels), alphaDeg * DEG)
