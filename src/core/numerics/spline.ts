@@ -52,7 +52,7 @@ function solveTridiagonalInPlace(
 }
 
 /** Index of the interval that holds s, found by bisection; the end intervals serve beyond the ends. */
-export function intervalOf(knots: Float64Array, s: number): number {
+function intervalOf(knots: Float64Array, s: number): number {
   let low = 0
   let high = knots.length - 1
   while (high - low > 1) {

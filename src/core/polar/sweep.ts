@@ -18,6 +18,8 @@ const NO_BOUNDARY_LAYER = { dragCoefficient: null, transitionUpper: null, transi
  */
 export function sweep(section: Section, state: SectionState, alphas: readonly number[]): Polar {
   checkState(state)
+  const absurd = alphas.find((alpha) => !Number.isFinite(alpha))
+  if (absurd !== undefined) throw new BadInput(`angle of attack ${absurd}: give a finite angle`)
   const points = pointsOf(section, state, alphas)
   const { method, surface, tripUpper, tripLower, flap } = state
   const mach = method === 'thin' ? 0 : state.mach
@@ -75,6 +77,8 @@ export function pressureAt(section: Section, state: SectionState, at: Operating)
   }
   if (state.method === 'viscous') return noViscousMethod()
   checkState(state)
+  const asked = 'alpha' in at ? at.alpha : at.lift
+  if (!Number.isFinite(asked)) throw new BadInput(`angle or lift coefficient ${asked}: give a finite value`)
   const panels = placePanels(section, state.panels)
   const flow = solvePanels(panels)
   const alpha = 'alpha' in at ? at.alpha : flow.solved ? alphaForLift(flow, at.lift, state.mach) : null

@@ -50,6 +50,12 @@ describe('an angle sweep', () => {
 })
 
 describe('the surface pressure', () => {
+  it('and the sweep refuse an angle or a lift that is no number', () => {
+    expect(() => sweep(section, state(), [0, NaN])).toThrow(BadInput)
+    expect(() => pressureAt(section, state(), { alpha: Infinity })).toThrow(BadInput)
+    expect(() => pressureAt(section, state(), { lift: NaN })).toThrow(BadInput)
+  })
+
   it('at a lift has that lift, and agrees with the sweep at its angle', () => {
     const pressure = pressureAt(section, state({ mach: 0.2 }), { lift: 0.6 })
     expect(pressure.liftCoefficient).toBeCloseTo(0.6, 8)
