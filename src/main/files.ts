@@ -109,7 +109,7 @@ async function readPicked(parts: FileParts, path: string): Promise<OpenedFile> {
   const name = basename(path)
   if ((await parts.sizeOf(path)) > LARGEST_FILE) {
     throw new Error(
-      `${name} is larger than ${LARGEST_FILE / 1e6} MB, so it is not read. Open a smaller file.`,
+      `${name} is larger than ${LARGEST_FILE / 1024 / 1024} MB, so it is not read. Open a smaller file.`,
     )
   }
   return { name, bytes: await parts.read(path) }

@@ -82,4 +82,4 @@ export const MENU_COMMANDS = [
 export type MenuCommand = (typeof MENU_COMMANDS)[number]
 
 /** Text read as a section is refused above this size, in bytes, before it is read. */
-export const LARGEST_FILE = 5_000_000
+export const LARGEST_FILE = 5 * 1024 * 1024
