@@ -81,7 +81,7 @@ export function solvePanels(panels: Panels): PanelFlow {
  * The last equation of a sharp edge. The mean speed of the two sides, v(d) = (upper - lower) / 2 at the
  * distance d from the edge, is smooth even for a cusp, where the speeds themselves are fixed only by the
  * difference of two nearly equal equations. The edge speed is its straight continuation through the next
- * two pairs of nodes; a parabola through three changes no lift by more than 1e-6.
+ * two pairs of nodes. A parabola through three would change the lift by 3e-7 (cusp) to 1e-5 at 180 panels.
  */
 function edgeRow({ x, y }: Panels, row: Float64Array): void {
   const n = x.length - 1
