@@ -1,8 +1,9 @@
 import { dirname, isAbsolute, join } from 'node:path'
-import { assemble, type Comparison } from '../core'
+import { assemble, BadInput, type Comparison } from '../core'
 import { readBrief, type Brief, type BriefEntry } from '../io/brief'
 import { decodeText } from '../io/coordinates'
 import { jobFromBrief } from '../io/job'
+import { FileProblem } from '../io/problem'
 import { run } from '../run/run'
 import { Failure, STATUS } from './failure'
 import { fileReader } from './inputFiles'
@@ -47,7 +48,11 @@ export async function runBrief(
   )
   const known = await withWorkers(terminal, (options) =>
     run(job, { ...options, onResult: (_known, { done, asked }) => terminal.progress(done, asked) }),
-  )
+  ).catch((error: unknown) => {
+    // A value of the brief that only the computation can judge, such as an altitude.
+    if (error instanceof BadInput) throw new FileProblem(path, null, error.message, 'correct the brief')
+    throw error
+  })
   const comparison = assemble(job, known)
   for (const line of [...warnings, ...faults]) terminal.complain(line)
   const marked = reportMarks(comparison, terminal.complain)

@@ -40,7 +40,7 @@ export function nacaSection(designation: string, options: { readonly edge?: Edge
   const digits = designation.trim().replace(/^naca[\s:-]*/i, '')
   if (!/^\d{4,5}$/.test(digits)) {
     throw new BadInput(
-      `NACA ${digits || '(nothing)'}: not generated here; give 4 or 5 digits, or open a coordinate file`,
+      `NACA ${digits || '(nothing)'}: not generated here; open a coordinate file, or give 4 or 5 digits`,
     )
   }
   const thickness = Number(digits.slice(-2)) / 100
