@@ -56,7 +56,7 @@ function sentences(found: Understood): string[] {
   if (Math.abs(found.chord - 1) > 1e-6)
     list.push(`scaled from a chord of ${Number(found.chord.toPrecision(6))}`)
   if (found.turned) list.push(`turned by ${degrees(-found.longestChordAngle)} deg onto its longest chord`)
-  else if (Math.abs(found.longestChordAngle) > 1e-5) {
+  else if (Math.abs(found.longestChordAngle) > 1e-4) {
     list.push(
       `its longest chord lies ${degrees(found.longestChordAngle)} deg off the axis of the file, which is kept`,
     )

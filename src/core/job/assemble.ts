@@ -1,6 +1,6 @@
 import { thinAirfoil } from '../flow/thinAirfoil'
 import type { Polar } from '../polar/polar'
-import { measure } from '../shape/measures'
+import { depthAt, measure } from '../shape/measures'
 import type { Section } from '../shape/section'
 import { waviness } from '../shape/waviness'
 import { localLiftAt, type WingAtCondition } from '../wing/wing'
@@ -37,33 +37,34 @@ export function assemble(job: Job, known: Known): Comparison {
 }
 
 function comparedEntry(job: Job, entry: JobEntry, known: Known): ComparedEntry {
-  const root = entry.root === null ? null : factsOf(entry.root)
+  const root = entry.root === null ? null : factsOf(entry.root, job.wing.sparAt)
   return {
     name: entry.name,
     rootName: entry.rootName,
     tipName: entry.tipName,
     fault: entry.fault,
     root,
-    tip: entry.tip === entry.root || entry.tip === null ? root : factsOf(entry.tip),
+    tip: entry.tip === entry.root || entry.tip === null ? root : factsOf(entry.tip, job.wing.sparAt),
     polars: usedPolars(job, entry, known),
     conditions: job.conditions.map((condition) => atCondition(job, entry, condition, known)),
   }
 }
 
 /** Facts of sections met before: they depend on nothing but the section, which never changes. */
-const facts = new WeakMap<Section, SectionFacts>()
+const met = new WeakMap<Section, Omit<SectionFacts, 'depthAtSpar'>>()
 
-function factsOf(section: Section): SectionFacts {
-  const had = facts.get(section)
-  if (had !== undefined) return had
-  const made = {
-    section,
-    measures: measure(section),
-    thin: thinAirfoil(section),
-    waviness: waviness(section),
+function factsOf(section: Section, sparAt: number): SectionFacts {
+  let facts = met.get(section)
+  if (facts === undefined) {
+    facts = {
+      section,
+      measures: measure(section),
+      thin: thinAirfoil(section),
+      waviness: waviness(section),
+    }
+    met.set(section, facts)
   }
-  facts.set(section, made)
-  return made
+  return { ...facts, depthAtSpar: depthAt(section, sparAt) }
 }
 
 function usedPolars(job: Job, entry: JobEntry, known: Known): EntryPolar[] {

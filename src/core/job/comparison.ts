@@ -40,6 +40,8 @@ export interface SectionFacts {
   readonly measures: Measures
   readonly thin: ThinAirfoil
   readonly waviness: Waviness
+  /** Depth at the brief's spar place, chords, skin included. */
+  readonly depthAtSpar: number
 }
 
 /** A polar that the comparison used. */

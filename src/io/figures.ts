@@ -1,0 +1,1 @@
+export { FIGURES } from '../core'
