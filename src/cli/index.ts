@@ -1,4 +1,5 @@
 import { BadInput } from '../core'
+import { FileProblem } from '../io/problem'
 import { Failure, STATUS } from './failure'
 import { callersFolder, type Command, type Terminal } from './terminal'
 
@@ -59,8 +60,7 @@ function statusOf(error: unknown, name: string, terminal: Terminal): number {
   if (terminal.signal.aborted) return STATUS.interrupted
   // The reader of a pipe has gone: there is nobody left to tell.
   if ((error as NodeJS.ErrnoException).code === 'EPIPE') return STATUS.done
-  const expected =
-    error instanceof Failure || error instanceof BadInput || (error as Error).name === 'FileProblem'
+  const expected = [Failure, FileProblem, BadInput].some((kind) => error instanceof kind)
   terminal.complain(
     expected
       ? `${name}: ${(error as Error).message}`
@@ -72,10 +72,12 @@ function statusOf(error: unknown, name: string, terminal: Terminal): number {
 const interrupt = new AbortController()
 process.once('SIGINT', () => interrupt.abort())
 
+// A reader that has gone is met where the text is written; here it must only not end the program.
+process.stdout.on('error', () => {})
+
 const terminal: Terminal = {
   print: (text) =>
     new Promise((resolve, reject) => {
-      process.stdout.once('error', reject)
       process.stdout.write(text, (error) => (error ? reject(error) : resolve()))
     }),
   complain: (line) => process.stderr.write(line.endsWith('\n') ? line : `${line}\n`),

@@ -19,7 +19,9 @@ export interface Served {
  * Throws when the folder is not there or no port can be had.
  */
 export async function serveWindow(folder: string, port = 0): Promise<Served> {
-  const root = await realpath(folder)
+  const root = await realpath(folder).catch(() => {
+    throw new Error('it is not built; run "npm run build"')
+  })
   const server = createServer((request, response) => {
     answer(root, hosts(server), request, response).catch(() => refuse(response, 500, 'Internal error'))
   })

@@ -25,7 +25,10 @@ const parts: StartParts = {
       {
         folder: electronFolder(import.meta.url),
         nodeMajor: Number(process.versions.node.split('.')[0]),
-        download: runDownload,
+        download: (script, limitMs, stopped) => {
+          process.stderr.write(`Fetching Electron once, for at most ${limitMs / 1000} s …\n`)
+          return runDownload(script, limitMs, stopped)
+        },
       },
       signal,
     ),

@@ -61,7 +61,7 @@ describe('coordinate files', () => {
     const parts = desk({ '/a/one.txt': '1' })
     parts.large.add('/a/one.txt')
     parts.picks.push(['/a/one.txt'])
-    parts.read = () => Promise.reject(new Error('it was read'))
+    Object.assign(parts, { read: () => Promise.reject(new Error('it was read')) })
     await expect(openFiles(parts)).rejects.toThrow('one.txt is larger than 5 MB')
   })
 })

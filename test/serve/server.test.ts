@@ -92,10 +92,7 @@ describe('the served window', () => {
     expect((await ask('/', { method })).status).toBe(405)
   })
 
-  it.each(['example.org', '127.0.0.1', '127.0.0.1:1'])(
-    'refuses a request for host "%s"',
-    async (host) => {
-      expect((await ask('/', { host })).status).toBe(403)
-    },
-  )
+  it.each(['example.org', '127.0.0.1', '127.0.0.1:1'])('refuses a request for host "%s"', async (host) => {
+    expect((await ask('/', { host })).status).toBe(403)
+  })
 })

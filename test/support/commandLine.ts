@@ -32,7 +32,7 @@ export interface Around {
 
 /** The environment of a command: no cache between tests, nothing of the npm that runs them. */
 function environment(given: NodeJS.ProcessEnv = {}): NodeJS.ProcessEnv {
-  const plain = { ...process.env, SECTIONWRIGHT_NO_CACHE: '1' }
+  const plain: NodeJS.ProcessEnv = { ...process.env, SECTIONWRIGHT_NO_CACHE: '1' }
   delete plain['npm_lifecycle_event']
   delete plain['INIT_CWD']
   return { ...plain, ...given }
