@@ -46,6 +46,9 @@ export async function runBrief(
     sections === null ? inBrief : read,
     { method },
   )
+  // A bad entry of a brief is marked and the rest computed; a bad argument ends the command.
+  const bad = sections === null ? null : (job.entries.find(({ fault }) => fault !== null) ?? null)
+  if (bad !== null) throw new Failure(`${bad.fault}`)
   const known = await withWorkers(terminal, (options) =>
     run(job, { ...options, onResult: (_known, { done, asked }) => terminal.progress(done, asked) }),
   ).catch((error: unknown) => {

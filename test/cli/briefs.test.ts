@@ -212,6 +212,11 @@ describe('bad input of briefs', () => {
     ['a folder below a file', ['compare', 'briefs/small.brief.json', '--out', 'briefs/lens.txt/x'], 'folder'],
     ['half a pair', ['wing', 'briefs/small.brief.json', '--root', 'naca:2412'], '--tip'],
     ['viscous, which is not there', ['wing', 'briefs/small.brief.json', '--method', 'viscous'], '--method'],
+    [
+      'a bad section of several',
+      ['wing', 'briefs/small.brief.json', '--section', 'naca:2412', '--section', 'missing.txt'],
+      'missing.txt',
+    ],
     ['a bad section', ['wing', 'briefs/small.brief.json', '--section', 'missing.txt'], 'missing.txt'],
   ]
 

@@ -3,7 +3,7 @@ import { join } from 'node:path'
 import { pathToFileURL } from 'node:url'
 import { describe, expect, it } from 'vitest'
 import { threadPool } from '../../src/cli/threads'
-import { nacaSection, runTask, taskKey, type Task } from '../../src/core'
+import { nacaSection, runTask, taskKey, type SectionState, type Task } from '../../src/core'
 import { temporaryFolder } from '../support/commandLine'
 
 const folder = temporaryFolder()
@@ -11,10 +11,10 @@ const signal = new AbortController().signal
 const BUILT = pathToFileURL(join(process.cwd(), 'out', 'main', 'cliWorker.js'))
 
 function tasks(): Task[] {
-  const state = {
+  const state: SectionState = {
     ...{ method: 'panel', reynolds: null, mach: 0.2, surface: 'clean', amplification: null },
     ...{ tripUpper: 1, tripLower: 1, flap: 0, panels: 60 },
-  } as const
+  }
   const section = nacaSection('2412')
   return [
     { kind: 'polar', section, state, alphas: [-0.05, 0, 0.1] },
