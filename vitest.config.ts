@@ -6,6 +6,7 @@ export default defineConfig({
   test: {
     include: ['test/**/*.test.ts'],
     exclude: ['test/e2e/**'],
+    globalSetup: ['test/support/build.ts'],
     setupFiles: ['test/support/strictConsole.ts'],
     testTimeout: 30_000,
     maxWorkers: 2,

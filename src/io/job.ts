@@ -14,6 +14,7 @@ import {
   type WingShape,
 } from '../core'
 import type { Brief, BriefCondition, BriefEntry } from './briefTypes'
+import { entryName } from './entryName'
 import { FileProblem } from './problem'
 import { resolveSection, type ReadBytes } from './resolveSection'
 
@@ -118,11 +119,6 @@ function jobCondition(condition: BriefCondition, brief: Brief): Condition {
     climbRate: condition.climb_rate_m_s,
     reynolds: condition.reynolds,
   }
-}
-
-/** What an entry is called in files: its name, else its text; a pair is `root > tip`. */
-export function entryName(entry: BriefEntry): string {
-  return entry.name ?? entry.section ?? `${entry.root ?? '?'} > ${entry.tip ?? '?'}`
 }
 
 function jobEntry(

@@ -45,7 +45,9 @@ function runElectron(program: string, signal: AbortSignal): Promise<number | nul
   const app = fileURLToPath(new URL('../..', import.meta.url))
   return new Promise((resolve) => {
     const started = Date.now()
-    const child = spawn(program, [app], { stdio: ['ignore', 'inherit', 'ignore'] })
+    // Set by some editors for their own Electron; with it, ours would start as plain Node.
+    const { ELECTRON_RUN_AS_NODE: _ignored, ...env } = process.env
+    const child = spawn(program, [app], { stdio: ['ignore', 'inherit', 'ignore'], env })
     signal.addEventListener('abort', () => child.kill(), { once: true })
     child.once('error', () => resolve(null))
     child.once('exit', (status) => {

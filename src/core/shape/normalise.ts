@@ -57,7 +57,9 @@ export function sectionFromPoints(
   const last = x.length - 1
   const edgeGap = Math.hypot(x[0] - x[last], y[0] - y[last])
   if (!(edgeGap < WIDEST_GAP)) {
-    throw new BadInput(`the trailing edge is ${(100 * edgeGap).toFixed(0)} % of the chord thick; give less than 20 %`)
+    throw new BadInput(
+      `the trailing edge is ${(100 * edgeGap).toFixed(0)} % of the chord thick; give less than 20 %`,
+    )
   }
   if (crossesItself(x, y)) throw new BadInput('the outline crosses itself')
   const understood = {
@@ -67,7 +69,9 @@ export function sectionFromPoints(
   return { section: { name: options.name, x, y, meanLine: null, notes: [] }, understood }
 }
 
-type Ordered = Pick<Understood, 'dropped' | 'reversed' | 'restarted' | 'exchanged'> & { readonly points: Points }
+type Ordered = Pick<Understood, 'dropped' | 'reversed' | 'restarted' | 'exchanged'> & {
+  readonly points: Points
+}
 
 function inOrder(raw: RawOutline): Ordered {
   const all = raw.kind === 'loop' ? raw.points : [...raw.upper, ...raw.lower]
@@ -125,7 +129,10 @@ function signedArea(points: Points): number {
   return area
 }
 
-type Placed = Pick<Understood, 'turned' | 'chord' | 'longestChordAngle'> & { x: Float64Array; y: Float64Array }
+type Placed = Pick<Understood, 'turned' | 'chord' | 'longestChordAngle'> & {
+  x: Float64Array
+  y: Float64Array
+}
 
 function place(points: Points, chordLine: ChordLine | null): Placed {
   const x = Float64Array.from(points, ([value]) => value)

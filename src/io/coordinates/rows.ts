@@ -16,6 +16,8 @@ export interface Rows {
 }
 
 const COMMENT = /^\s*(#|!|%|\/\/)/
+/** Old programs end a text with this character. */
+const END_OF_TEXT = String.fromCharCode(26)
 const NUMBER = /^[-+]?(\d+\.?\d*|\.\d+)([ed][-+]?\d+)?$/i
 const COMMA_NUMBERS = /^\s*[-+]?\d*,\d+(e[-+]?\d+)?[\s;]+[-+]?\d*,\d+(e[-+]?\d+)?[\s;]*$/i
 
@@ -33,7 +35,7 @@ export function readRows(text: string, file: string): Rows {
   }
   lines.forEach((raw, i) => {
     if (COMMENT.test(raw)) return
-    const line = raw.replace(/\s(#|!|%|\/\/).*$/, '').replace(/\u001a/g, '')
+    const line = raw.replace(/\s(#|!|%|\/\/).*$/, '').replaceAll(END_OF_TEXT, '')
     if (line.trim() === '') return endBlock()
     const cells = cellsOf(line, decimalComma)
     const values = cells.map((cell) => valueOf(cell, decimalComma))

@@ -1,0 +1,6 @@
+import type { BriefEntry } from './briefTypes'
+
+/** What an entry is called in files and tables: its name, else its text; a pair is `root > tip`. */
+export function entryName(entry: BriefEntry): string {
+  return entry.name ?? entry.section ?? `${entry.root ?? '?'} > ${entry.tip ?? '?'}`
+}

@@ -1,0 +1,23 @@
+import { reactive } from 'vue'
+import type { HoverState } from '../compare/hover'
+
+export type ViewName = 'Compare' | 'Wing'
+export type Theme = 'system' | 'light' | 'dark'
+
+/** What the window shows of the document: not saved, not undone. */
+export interface View {
+  name: ViewName
+  /** Index of the shown condition. */
+  condition: number
+  hover: HoverState | null
+  theme: Theme
+  sort: { column: string; descending: boolean } | null
+  /** The first-start hint has been read. */
+  hint: boolean
+}
+
+export function createView(): View {
+  return reactive<View>({
+    ...{ name: 'Compare', condition: 0, hover: null, theme: 'system', sort: null, hint: true },
+  }) as View
+}
