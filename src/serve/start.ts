@@ -46,7 +46,8 @@ function runElectron(program: string, signal: AbortSignal): Promise<number | nul
   return new Promise((resolve) => {
     const started = Date.now()
     // Set by some editors for their own Electron; with it, ours would start as plain Node.
-    const { ELECTRON_RUN_AS_NODE: _ignored, ...env } = process.env
+    const env = { ...process.env }
+    delete env['ELECTRON_RUN_AS_NODE']
     const child = spawn(program, [app], { stdio: ['ignore', 'inherit', 'ignore'], env })
     signal.addEventListener('abort', () => child.kill(), { once: true })
     child.once('error', () => resolve(null))

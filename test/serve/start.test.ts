@@ -2,6 +2,7 @@ import { spawn, type ChildProcess } from 'node:child_process'
 import { join } from 'node:path'
 import { afterEach, describe, expect, it } from 'vitest'
 import { CONTENT_SECURITY_POLICY } from '../../src/shared/security'
+import { checkBuilt } from '../support/build'
 
 const START = join(process.cwd(), 'out', 'main', 'start.js')
 let child: ChildProcess | null = null
@@ -30,6 +31,7 @@ describe.skipIf(process.platform === 'darwin' || process.platform === 'win32')(
   'npm start without a display',
   () => {
     it('gives an address that answers with the window, and the same job by command; Ctrl-C ends it', async () => {
+      checkBuilt('out/renderer/index.html')
       const { running, said } = await startWithoutDisplay(2)
       const address = /http:\/\/127\.0\.0\.1:\d+\//.exec(said)?.[0]
       expect(address).toBeDefined()

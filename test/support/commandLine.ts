@@ -1,11 +1,12 @@
 import { execFile, spawn, type ChildProcess } from 'node:child_process'
-import { existsSync } from 'node:fs'
 import { mkdtemp, rm } from 'node:fs/promises'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { afterAll, beforeAll } from 'vitest'
+import { checkBuilt } from './build'
 
-const CLI = join(process.cwd(), 'out', 'main', 'cli.js')
+const CLI = 'out/main/cli.js'
+const PROGRAM = join(process.cwd(), CLI)
 
 /** A coordinate file of a symmetric lens of parabolic arcs, 12 % thick. */
 export const LENS = [
@@ -40,12 +41,12 @@ function environment(given: NodeJS.ProcessEnv = {}): NodeJS.ProcessEnv {
 
 /** Runs the built command line to its end. */
 export function command(args: readonly string[], around: Around = {}): Promise<Ended> {
-  if (!existsSync(CLI)) throw new Error(`${CLI} is not there: run "npm run build" first`)
+  checkBuilt(CLI)
   return new Promise((resolve) => {
     const options = {
       ...{ cwd: around.folder, env: environment(around.env), maxBuffer: 1e9 },
     }
-    execFile(process.execPath, [CLI, ...args], options, (error, out, err) => {
+    execFile(process.execPath, [PROGRAM, ...args], options, (error, out, err) => {
       const status = error === null ? 0 : typeof error.code === 'number' ? error.code : -1
       resolve({ status, out, err })
     })
@@ -54,7 +55,8 @@ export function command(args: readonly string[], around: Around = {}): Promise<E
 
 /** Starts the built command line and leaves it to the test. */
 export function started(args: readonly string[], around: Around = {}): ChildProcess {
-  return spawn(process.execPath, [CLI, ...args], {
+  checkBuilt(CLI)
+  return spawn(process.execPath, [PROGRAM, ...args], {
     cwd: around.folder,
     env: environment(around.env),
     stdio: 'ignore',
