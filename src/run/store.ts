@@ -26,19 +26,3 @@ export function memoryStore(capacity: number): Store {
     },
   }
 }
-
-/** Asks `near` first, then `far`; what `far` knows is kept in `near` too. */
-export function layeredStore(near: Store, far: Store): Store {
-  return {
-    get: async (key) => {
-      const kept = await near.get(key)
-      if (kept !== null) return kept
-      const found = await far.get(key)
-      if (found !== null) await near.put(key, found)
-      return found
-    },
-    put: async (key, result) => {
-      await Promise.all([near.put(key, result), far.put(key, result)])
-    },
-  }
-}

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { layeredStore, memoryStore } from '../../src/run/store'
+import { memoryStore } from '../../src/run/store'
 import { resultOf } from './fakes'
 
 describe('the store in memory', () => {
@@ -19,26 +19,5 @@ describe('the store in memory', () => {
     expect(await store.get('b')).toBeNull()
     expect(await store.get('a')).toEqual(resultOf('a'))
     expect(await store.get('c')).toEqual(resultOf('c'))
-  })
-})
-
-describe('a store in two layers', () => {
-  it('asks the far one only once for a result', async () => {
-    const far = memoryStore(9)
-    await far.put('a', resultOf('a'))
-    let asked = 0
-    const counting = { ...far, get: (key: string) => (asked++, far.get(key)) }
-    const store = layeredStore(memoryStore(9), counting)
-    expect(await store.get('a')).toEqual(resultOf('a'))
-    expect(await store.get('a')).toEqual(resultOf('a'))
-    expect(asked).toBe(1)
-  })
-
-  it('puts into both', async () => {
-    const near = memoryStore(9)
-    const far = memoryStore(9)
-    await layeredStore(near, far).put('a', resultOf('a'))
-    expect(await near.get('a')).toEqual(resultOf('a'))
-    expect(await far.get('a')).toEqual(resultOf('a'))
   })
 })
