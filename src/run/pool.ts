@@ -52,8 +52,15 @@ export function openPool(spawn: Spawn, size: number): Pool {
   }
 
   const start = (item: Item): void => {
+    let worker: TaskWorker
+    try {
+      worker = idle.pop() ?? spawn()
+    } catch (error) {
+      items.delete(item.key)
+      for (const waiter of item.waiters) waiter.resolve(failed(error))
+      return
+    }
     busy++
-    const worker = idle.pop() ?? spawn()
     item.worker = worker
     worker.run(item.task).then(
       (result) => settle(item, worker, result, true),

@@ -86,6 +86,16 @@ describe('the pool', () => {
     expect(await next).toEqual(resultOf('b'))
   })
 
+  it('marks tasks failed when no worker can be started', async () => {
+    const pool = openPool(() => {
+      throw new Error('no worker here')
+    }, 2)
+    const all = ['a', 'b', 'c'].map((name) => pool.run(name, longTask(name), at(0)))
+    for (const result of await Promise.all(all)) {
+      expect(result).toMatchObject({ kind: 'failed', reason: expect.stringContaining('no worker here') })
+    }
+  })
+
   it('ends its workers and rejects what is left when it is closed', async () => {
     const { spawn, running } = handWorkers()
     const pool = openPool(spawn, 1)
