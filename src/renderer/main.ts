@@ -4,6 +4,7 @@ import { findHost } from './host'
 import { createApp } from './state/app'
 import './style/theme.css'
 import './style/window.css'
+import './style/panes.css'
 
 const worker = new Worker(new URL('./worker/desk.worker.ts', import.meta.url), { type: 'module' })
 createVue(App, { app: createApp(findHost(), worker) }).mount('#app')

@@ -1,5 +1,5 @@
 import { reactive } from 'vue'
-import type { HoverState } from '../compare/hover'
+import type { PointState } from '../../io/plots/plot'
 
 export type ViewName = 'Compare' | 'Wing'
 export type Theme = 'system' | 'light' | 'dark'
@@ -9,7 +9,7 @@ export interface View {
   name: ViewName
   /** Index of the shown condition. */
   condition: number
-  hover: HoverState | null
+  hover: PointState | null
   theme: Theme
   sort: { column: string; descending: boolean } | null
   /** The first-start hint has been read. */

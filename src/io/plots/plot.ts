@@ -1,0 +1,54 @@
+/** An axis of a plot. */
+export interface Axis {
+  /** Plain words with the unit. */
+  readonly label: string
+  /** Larger values point down (pressure: suction up). */
+  readonly reversed?: boolean
+  readonly from?: number
+  readonly to?: number
+}
+
+/** The state that a point of a curve stands for, so that other plots can mark the same. */
+export interface PointState {
+  /** Index of the entry. */
+  readonly entry: number
+  /** Angle of attack, rad; null where the plot knows only a place. */
+  readonly alpha: number | null
+  /** Chord fraction; null where the plot knows only an angle. */
+  readonly xOverC: number | null
+}
+
+/** A curve of one entry. */
+export interface Curve {
+  readonly entry: number
+  readonly name: string
+  readonly x: readonly number[]
+  readonly y: readonly number[]
+  readonly states: readonly PointState[]
+}
+
+/** A single point that is marked on a curve: the shown condition. */
+export interface PlotMark {
+  readonly entry: number
+  readonly x: number
+  readonly y: number
+}
+
+/** A line across the plot at a value of one axis. */
+export interface ReferenceLine {
+  readonly axis: 'x' | 'y'
+  readonly at: number
+}
+
+/** What is drawn, not how: made from a comparison, drawn by the window or into a file. */
+export interface Plot {
+  readonly key: string
+  readonly title: string
+  readonly x: Axis
+  readonly y: Axis
+  readonly curves: readonly Curve[]
+  readonly marks: readonly PlotMark[]
+  readonly lines: readonly ReferenceLine[]
+}
+
+export const DEGREES = 180 / Math.PI
