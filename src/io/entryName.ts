@@ -4,3 +4,8 @@ import type { BriefEntry } from './briefTypes'
 export function entryName(entry: BriefEntry): string {
   return entry.name ?? entry.section ?? `${entry.root ?? '?'} > ${entry.tip ?? '?'}`
 }
+
+/** A name as the window shows it: generated sections by the words of the trade. */
+export function shownName(name: string): string {
+  return name.replace(/\bnaca:/gi, 'NACA ')
+}

@@ -11,8 +11,19 @@ export function taskKey(task: Task): string {
   return `${task.kind} ${sectionKey(task.section)} ${canonical(task.state)} ${canonical(asked)}`
 }
 
+/** Names of sections met before: a section never changes. */
+const met = new WeakMap<Section, string>()
+
 /** The part of a task's name that belongs to the outline. */
-export function sectionKey(section: Section): string {
+function sectionKey(section: Section): string {
+  const had = met.get(section)
+  if (had !== undefined) return had
+  const name = hashedName(section)
+  met.set(section, name)
+  return name
+}
+
+function hashedName(section: Section): string {
   const low = hash(section, 0x811c9dc5)
   const high = hash(section, 0x01000193)
   const line = section.meanLine === null ? '' : canonical(section.meanLine)

@@ -1,4 +1,5 @@
 import type { Comparison, PolarPoint } from '../../core'
+import { shownName } from '../entryName'
 import { DEGREES, type Axis, type Curve, type Plot, type PlotMark } from './plot'
 
 type Reading = (point: PolarPoint) => number | null
@@ -12,7 +13,7 @@ const liftToDrag: Reading = (point) =>
     ? null
     : point.liftCoefficient / point.dragCoefficient
 
-const LIFT: Axis = { label: 'section lift c_l' }
+const LIFT: Axis = { label: 'lift c_l' }
 
 /** Polars of every entry at the state of a condition; those with drag only where some entry has it. */
 export function polarPlots(comparison: Comparison, condition: number): Plot[] {
@@ -24,11 +25,11 @@ export function polarPlots(comparison: Comparison, condition: number): Plot[] {
       'Lift against angle',
       alphaDeg,
       lift,
-      { label: 'angle of attack, deg' },
+      { label: 'angle, deg' },
       LIFT,
     ),
     plotOf(comparison, condition, 'moment', 'Moment against lift', lift, moment, LIFT, {
-      label: 'moment c_m about ¼ chord',
+      label: 'c_m about ¼ chord',
     }),
   ]
   const withDrag = comparison.entries.some((entry) =>
@@ -73,7 +74,7 @@ function plotOf(
     if (!pane || points.length === 0) return
     curves.push({
       entry: index,
-      name: entry.name,
+      name: shownName(entry.name),
       x: points.map((point) => readX(point)!),
       y: points.map((point) => readY(point)!),
       states: points.map((point) => ({ entry: index, alpha: point.alpha, xOverC: null })),

@@ -1,4 +1,5 @@
 import type { Comparison } from '../../core'
+import { shownName } from '../entryName'
 import type { Curve, Plot } from './plot'
 
 /** Surface pressure of every entry at a condition, at the shown station, suction upward. */
@@ -8,7 +9,7 @@ export function pressurePlot(comparison: Comparison, condition: number): Plot {
     if (!pressure?.converged) return []
     const x = [...pressure.x]
     const states = x.map((xOverC) => ({ entry: index, alpha: pressure.alpha, xOverC }))
-    return [{ entry: index, name: entry.name, x, y: [...pressure.pressureCoefficient], states }]
+    return [{ entry: index, name: shownName(entry.name), x, y: [...pressure.pressureCoefficient], states }]
   })
   return {
     key: 'pressure',

@@ -1,4 +1,5 @@
 import type { ComparedEntry } from '../../core'
+import { shownName } from '../entryName'
 
 /** A section drawn at true scale. */
 export interface ShapeOutline {
@@ -19,7 +20,8 @@ export function shapeOutlines(entry: ComparedEntry): ShapeOutline[] {
     const points = Array.from(section.x, (x, k) => `${x.toFixed(5)} ${(-section.y[k]!).toFixed(5)}`)
     const camber = (100 * measures.maxCamber).toFixed(1).replace('-', '−')
     return {
-      name: facts.length === 1 ? entry.name : `${entry.name}, ${i === 0 ? 'root' : 'tip'}`,
+      name:
+        facts.length === 1 ? shownName(entry.name) : `${shownName(entry.name)}, ${i === 0 ? 'root' : 'tip'}`,
       path: `M${points.join('L')}Z`,
       low: Math.min(...section.y),
       high: Math.max(...section.y),

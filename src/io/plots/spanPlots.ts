@@ -1,4 +1,5 @@
 import type { Comparison, StationState } from '../../core'
+import { shownName } from '../entryName'
 import { DEGREES, type Curve, type Plot } from './plot'
 
 /** Local lift and induced angle of every entry along the half span at a condition. */
@@ -11,7 +12,7 @@ export function spanPlots(comparison: Comparison, condition: number): Plot[] {
       return [
         {
           entry: index,
-          name: entry.name,
+          name: shownName(entry.name),
           x: stations.map((station) => station.y),
           y: stations.map(read),
           states: stations.map(() => ({ entry: index, alpha: null, xOverC: null })),

@@ -63,14 +63,15 @@ export function chartOf(
     return i < 0 ? [] : [points([{ x: curve.x[i]!, y: curve.y[i]! }], curve.entry, 6, false)]
   })
   const axis = (which: 'x' | 'y') => {
-    const { label, reversed, from, to } = plot[which]
+    const { label, reversed } = plot[which]
+    const { from, to, step } = axisRange(plot, which)
     return {
       type: 'linear' as const,
       reverse: reversed ?? false,
-      ...(from === undefined ? {} : { min: from }),
-      ...(to === undefined ? {} : { max: to }),
+      min: from,
+      max: to,
       title: { display: true, text: label, color: ink, font: { size: 11 } },
-      ticks: { color: ink, font: { size: 11 }, maxTicksLimit: 7, maxRotation: 0 },
+      ticks: { color: ink, font: { size: 11 }, stepSize: step, maxTicksLimit: 9, maxRotation: 0 },
       border: { color: grid },
       grid: { color: grid, lineWidth: 0.7 },
     }
@@ -82,8 +83,6 @@ export function chartOf(
       animation: false,
       responsive: true,
       maintainAspectRatio: false,
-      parsing: false,
-      normalized: false,
       events: [],
       plugins: { legend: { display: false }, tooltip: { enabled: false } },
       scales: { x: axis('x'), y: axis('y') },
@@ -101,4 +100,24 @@ function referenceLines(plot: Plot, ink: string): LineSet[] {
     const ends = [low, high].map((end) => (axis === 'x' ? { x: at, y: end } : { x: end, y: at }))
     return { data: ends, borderColor: ink, borderWidth: 1, borderDash: [3, 3], pointRadius: 0 }
   })
+}
+
+/** Steps that an axis goes in, times a power of ten. */
+const NICE = [1, 2, 2.5, 5, 10]
+const ABOUT_STEPS = 5
+
+/** Ends and step of an axis: round numbers just outside what is drawn, unless the plot gives its ends. */
+function axisRange(plot: Plot, which: 'x' | 'y'): { from: number; to: number; step: number } {
+  const axis = plot[which]
+  const values = plot.curves.flatMap((curve) => curve[which])
+  const low = axis.from ?? (values.length > 0 ? Math.min(...values) : 0)
+  const high = axis.to ?? (values.length > 0 ? Math.max(...values) : 1)
+  const span = high - low || 1
+  const power = 10 ** Math.floor(Math.log10(span / ABOUT_STEPS))
+  const step = power * (NICE.find((nice) => nice * power * ABOUT_STEPS >= span) ?? 10)
+  return {
+    from: axis.from ?? step * Math.floor(low / step + 1e-9),
+    to: axis.to ?? step * Math.ceil(high / step - 1e-9),
+    step,
+  }
 }

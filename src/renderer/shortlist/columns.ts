@@ -59,11 +59,6 @@ export const COLUMNS: readonly Column[] = [
     value: (entry, _, i) => entry.conditions[i]?.wing?.inducedDrag ?? null,
   },
   {
-    ...{ key: 'efficiency', title: 'Span efficiency', unit: '', digits: 3 },
-    help: 'C_L squared over pi times aspect ratio times induced drag coefficient',
-    value: (entry, _, i) => entry.conditions[i]?.wing?.spanEfficiency ?? null,
-  },
-  {
     ...{ key: 'bending', title: 'Root bending', unit: 'N m', digits: 0 },
     help: 'Bending moment of one half wing at the root, air load only',
     value: (entry, _, i) => entry.conditions[i]?.wing?.rootBendingMoment ?? null,

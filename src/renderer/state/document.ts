@@ -1,11 +1,11 @@
-import { computed, ref } from 'vue'
+import { computed, shallowRef } from 'vue'
 import type { Brief, BriefCondition, BriefEntry, BriefLimit } from '../../io/briefTypes'
 import { createHistory } from './history'
 
 /** The document: brief and shortlist, with one named command a change. */
 export function createDocument(initial: Brief) {
   const history = createHistory(initial)
-  const saved = ref<Brief | null>(initial)
+  const saved = shallowRef<Brief | null>(initial)
   const brief = history.value
   const set = (name: string, part: Partial<Brief>, field?: string): void =>
     history.change(name, { ...brief.value, ...part }, field)

@@ -15,7 +15,7 @@ import { webWorker } from './webWorker'
 /** Results kept for changes back and forth. */
 const KEPT_RESULTS = 2000
 /** The window is told of new results no more often than this. */
-const TELL_EVERY_MS = 60
+const TELL_EVERY_MS = 250
 
 const store = memoryStore(KEPT_RESULTS)
 let pool: Pool | null = null
