@@ -14,6 +14,10 @@ const CORE_GLOBALS = [
   'fetch',
 ]
 
+/** Functions whose last digits the language leaves to each engine. */
+const ENGINE_FUNCTIONS =
+  'sin cos tan asin acos atan atan2 sinh cosh tanh exp expm1 log log10 log1p log2 pow cbrt hypot'.split(' ')
+
 export default tseslint.config(
   { ignores: ['out/', 'node_modules/', 'coverage/', 'test-output/'] },
   eslint.configs.recommended,
@@ -36,6 +40,14 @@ export default tseslint.config(
   {
     files: ['src/core/**/*.ts'],
     rules: {
+      'no-restricted-syntax': [
+        'error',
+        { selector: 'BinaryExpression[operator="**"]', message: 'Use power of core/numerics/elementary.' },
+        {
+          selector: 'AssignmentExpression[operator="**="]',
+          message: 'Use power of core/numerics/elementary.',
+        },
+      ],
       'no-restricted-globals': [
         'error',
         ...CORE_GLOBALS.map((name) => ({
@@ -50,6 +62,11 @@ export default tseslint.config(
           property: 'random',
           message: 'The core is pure: the same input gives the same result.',
         },
+        ...ENGINE_FUNCTIONS.map((property) => ({
+          object: 'Math',
+          property,
+          message: 'Engines differ in the last digits: take it from core/numerics/elementary.',
+        })),
       ],
     },
   },

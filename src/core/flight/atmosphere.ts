@@ -1,3 +1,4 @@
+import { exp, power } from '../numerics/elementary'
 import { BadInput } from '../numerics/errors'
 
 /** State of the air, SI. */
@@ -43,9 +44,9 @@ export function atmosphere(altitude: number, offset: number): Air {
   }
   const standard = SEA_LEVEL_TEMPERATURE + LAPSE * Math.min(altitude, TROPOPAUSE)
   const exponent = -G0 / (LAPSE * GAS_CONSTANT)
-  const lower = SEA_LEVEL_PRESSURE * (standard / SEA_LEVEL_TEMPERATURE) ** exponent
+  const lower = SEA_LEVEL_PRESSURE * power(standard / SEA_LEVEL_TEMPERATURE, exponent)
   const above = Math.max(altitude - TROPOPAUSE, 0)
-  const pressure = lower * Math.exp((-G0 * above) / (GAS_CONSTANT * TROPOPAUSE_TEMPERATURE))
+  const pressure = lower * exp((-G0 * above) / (GAS_CONSTANT * TROPOPAUSE_TEMPERATURE))
   const temperature = standard + offset
   if (!(temperature > 100)) throw new BadInput(`ISA offset ${offset} K leaves no air of ordinary temperature`)
   return {
@@ -53,6 +54,6 @@ export function atmosphere(altitude: number, offset: number): Air {
     pressure,
     density: pressure / (GAS_CONSTANT * temperature),
     speedOfSound: Math.sqrt(GAMMA * GAS_CONSTANT * temperature),
-    viscosity: (SUTHERLAND_FACTOR * temperature ** 1.5) / (temperature + SUTHERLAND_TEMPERATURE),
+    viscosity: (SUTHERLAND_FACTOR * power(temperature, 1.5)) / (temperature + SUTHERLAND_TEMPERATURE),
   }
 }

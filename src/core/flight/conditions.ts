@@ -1,3 +1,4 @@
+import { power } from '../numerics/elementary'
 import { atmosphere, G0, SEA_LEVEL_DENSITY, type Air } from './atmosphere'
 
 /** What of a condition the state of flight needs; SI. */
@@ -34,7 +35,7 @@ export interface FlightState {
 /** The state of flight of a wing of an area (m2). Throws BadInput for an altitude out of range. */
 export function flightState(area: number, flight: FlightInput): FlightState {
   const air = atmosphere(flight.altitude, flight.isaOffset)
-  const dynamicPressure = 0.5 * air.density * flight.speed ** 2
+  const dynamicPressure = 0.5 * air.density * power(flight.speed, 2)
   const weight = flight.mass * G0
   const load = flight.loadFactor * weight
   return {

@@ -1,3 +1,4 @@
+import { power } from '../numerics/elementary'
 import { BadInput } from '../numerics/errors'
 
 /** Greatest free-stream Mach number for which the pressure correction is offered. */
@@ -33,5 +34,5 @@ export function compressiblePressure(incompressible: number, mach: number): numb
 export function criticalPressure(mach: number): number {
   if (mach === 0) return -Infinity
   const ratio = (2 + (KAPPA - 1) * mach * mach) / (KAPPA + 1)
-  return (2 / (KAPPA * mach * mach)) * (ratio ** (KAPPA / (KAPPA - 1)) - 1)
+  return (2 / (KAPPA * mach * mach)) * (power(ratio, KAPPA / (KAPPA - 1)) - 1)
 }

@@ -1,3 +1,4 @@
+import { hypot } from '../numerics/elementary'
 import { cubicSpline } from '../numerics/spline'
 import type { Panels } from '../shape/panels'
 import type { TrailingEdge } from './trailingEdge'
@@ -34,8 +35,8 @@ export function loadWeights({ x, y }: Panels, edge: TrailingEdge): LoadWeights {
     along[i] = -weight * dy[i]
     across[i] = weight * dx[i]
     moment[i] = -weight * ((x[i] - 0.25) * dx[i] + y[i] * dy[i])
-    const before = i > 0 ? Math.hypot(x[i] - x[i - 1], y[i] - y[i - 1]) : 0
-    const after = i < n ? Math.hypot(x[i + 1] - x[i], y[i + 1] - y[i]) : 0
+    const before = i > 0 ? hypot(x[i] - x[i - 1], y[i] - y[i - 1]) : 0
+    const after = i < n ? hypot(x[i + 1] - x[i], y[i + 1] - y[i]) : 0
     circulation[i] = 0.5 * (before + after)
   }
   const gapX = x[0] - x[n]

@@ -1,3 +1,4 @@
+import { atan2, hypot, log } from '../numerics/elementary'
 import type { Panels } from '../shape/panels'
 
 /**
@@ -21,7 +22,7 @@ export function fillVortexInfluence(panels: Panels, matrix: Float64Array, stride
   for (let j = 0; j < last; j++) {
     const dx = x[j + 1] - x[j]
     const dy = y[j + 1] - y[j]
-    length[j] = Math.hypot(dx, dy)
+    length[j] = hypot(dx, dy)
     alongX[j] = dx / length[j]
     alongY[j] = dy / length[j]
   }
@@ -31,7 +32,7 @@ export function fillVortexInfluence(panels: Panels, matrix: Float64Array, stride
     let dx = x[i] - x[0]
     let dy = y[i] - y[0]
     let square = dx * dx + dy * dy
-    let logarithm = square > 0 ? Math.log(square) : 0
+    let logarithm = square > 0 ? log(square) : 0
     matrix[row] = 0
     for (let j = 0; j < last; j++) {
       const h = length[j]
@@ -40,9 +41,9 @@ export function fillVortexInfluence(panels: Panels, matrix: Float64Array, stride
       const nextX = x[i] - x[j + 1]
       const nextY = y[i] - y[j + 1]
       const nextSquare = nextX * nextX + nextY * nextY
-      const nextLogarithm = nextSquare > 0 ? Math.log(nextSquare) : 0
+      const nextLogarithm = nextSquare > 0 ? log(nextSquare) : 0
       const own = i === j || i === j + 1
-      const subtended = own ? 0 : Math.atan2(dx * nextY - dy * nextX, dx * nextX + dy * nextY)
+      const subtended = own ? 0 : atan2(dx * nextY - dy * nextX, dx * nextX + dy * nextY)
       const beyond = place - h
       // Twice the integrals of ln r and of (distance from the foot) ln r.
       const zeroth = place * logarithm - beyond * nextLogarithm - 2 * h + 2 * above * subtended

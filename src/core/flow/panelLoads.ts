@@ -1,3 +1,4 @@
+import { asin, atan2, cos, hypot, sin } from '../numerics/elementary'
 import type { Panels } from '../shape/panels'
 import { checkMach, compressiblePressure, criticalPressure } from './compressibility'
 import type { PanelFlow } from './vortexPanels'
@@ -28,31 +29,31 @@ export function panelLoads(flow: PanelFlow, alpha: number, mach: number = 0): Pa
   checkMach(mach)
   const { along, across, weights, panels } = flow
   const size = along.length
-  const cos = Math.cos(alpha)
-  const sin = Math.sin(alpha)
+  const cosine = cos(alpha)
+  const sine = sin(alpha)
   const pressureCoefficient = new Float64Array(size)
   let circulation = 0
   let [fx, fy, moment, incompressibleLift, lowest] = [0, 0, 0, 0, 1]
   for (let i = 0; i < size; i++) {
-    const speed = along[i] * cos + across[i] * sin
+    const speed = along[i] * cosine + across[i] * sine
     const plain = 1 - speed * speed
     const cp = mach === 0 ? plain : compressiblePressure(plain, mach)
     pressureCoefficient[i] = cp
     if (cp < lowest) lowest = cp
     circulation += weights.circulation[i] * speed
-    incompressibleLift += plain * (weights.across[i] * cos - weights.along[i] * sin)
+    incompressibleLift += plain * (weights.across[i] * cosine - weights.along[i] * sine)
     fx += cp * weights.along[i]
     fy += cp * weights.across[i]
     moment += cp * weights.moment[i]
   }
-  const liftFromPressure = fy * cos - fx * sin
+  const liftFromPressure = fy * cosine - fx * sine
   return {
     alpha,
     liftCoefficient: 2 * circulation + liftFromPressure - incompressibleLift,
     liftFromPressure,
     momentCoefficient: moment,
     pressureCoefficient,
-    stagnation: stagnationOf(panels, along, across, cos, sin),
+    stagnation: stagnationOf(panels, along, across, cosine, sine),
     reason: reasonOf(flow.solved, lowest, mach),
   }
 }
@@ -67,15 +68,15 @@ function stagnationOf(
   { x, y }: Panels,
   along: Float64Array,
   across: Float64Array,
-  cos: number,
-  sin: number,
+  cosine: number,
+  sine: number,
 ): { s: number; x: number; y: number } {
   let s = 0
   const last = x.length - 1
   for (let i = 0; i < last; i++) {
-    const here = along[i] * cos + across[i] * sin
-    const next = along[i + 1] * cos + across[i + 1] * sin
-    const h = Math.hypot(x[i + 1] - x[i], y[i + 1] - y[i])
+    const here = along[i] * cosine + across[i] * sine
+    const next = along[i + 1] * cosine + across[i + 1] * sine
+    const h = hypot(x[i + 1] - x[i], y[i + 1] - y[i])
     if (here > 0 && next <= 0) {
       const t = here / (here - next)
       return { s: s + t * h, x: x[i] + t * (x[i + 1] - x[i]), y: y[i] + t * (y[i + 1] - y[i]) }
@@ -97,8 +98,8 @@ export function alphaForLift(flow: PanelFlow, lift: number, mach: number = 0): n
   checkMach(mach)
   const atZero = panelLoads(flow, 0).liftCoefficient
   const atRight = panelLoads(flow, Math.PI / 2).liftCoefficient
-  const size = Math.hypot(atZero, atRight)
-  const closed = (wanted: number): number => Math.asin(wanted / size) - Math.atan2(atZero, atRight)
+  const size = hypot(atZero, atRight)
+  const closed = (wanted: number): number => asin(wanted / size) - atan2(atZero, atRight)
   if (!(size > 0) || Math.abs(lift) > size) return null
   let alpha = closed(lift)
   if (mach === 0) return alpha

@@ -1,3 +1,4 @@
+import { atan2, hypot, log } from '../numerics/elementary'
 import type { Panels } from '../shape/panels'
 
 /**
@@ -20,7 +21,7 @@ export function fillSourceInfluence({ x, y }: Panels, matrix: Float64Array, stri
     const row = i * stride
     matrix[row] = 0
     for (let j = 0; j < last; j++) {
-      const h = Math.hypot(x[j + 1] - x[j], y[j + 1] - y[j])
+      const h = hypot(x[j + 1] - x[j], y[j + 1] - y[j])
       const alongX = (x[j + 1] - x[j]) / h
       const alongY = (y[j + 1] - y[j]) / h
       const own = i === j || i === j + 1
@@ -37,11 +38,11 @@ export function fillSourceInfluence({ x, y }: Panels, matrix: Float64Array, stri
 /** Integrals over the panel of the angle and of t times the angle. */
 function integrals(place: number, inside: number, h: number): readonly [number, number] {
   const beyond = place - h
-  const near = Math.atan2(-place, inside)
-  const far = Math.atan2(-beyond, inside)
+  const near = atan2(-place, inside)
+  const far = atan2(-beyond, inside)
   const nearSquare = place * place + inside * inside
   const farSquare = beyond * beyond + inside * inside
-  const logarithms = inside === 0 ? 0 : 0.5 * inside * Math.log(nearSquare / farSquare)
+  const logarithms = inside === 0 ? 0 : 0.5 * inside * log(nearSquare / farSquare)
   const zeroth = place * near - beyond * far + logarithms
   const ofDistance = 0.5 * (nearSquare * near - farSquare * far + inside * h)
   return [zeroth, place * zeroth - ofDistance]

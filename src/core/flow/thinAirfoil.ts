@@ -1,3 +1,4 @@
+import { acos, cos, sin } from '../numerics/elementary'
 import { meanLineOf } from '../shape/meanLine'
 import type { MeanLine, Section } from '../shape/section'
 
@@ -59,7 +60,7 @@ export function centreOfPressure(thin: ThinAirfoil, alpha: number): number | nul
  * is a finite cosine series in theta, whose products with cos(n theta) integrate in closed form.
  */
 function closedForm(line: MeanLine, n: number): number {
-  const joint = Math.acos(1 - 2 * Math.min(Math.max(line.joint, 0), 1))
+  const joint = acos(1 - 2 * Math.min(Math.max(line.joint, 0), 1))
   return integral(slopeSeries(line.front), n, 0, joint) + integral(slopeSeries(line.rear), n, joint, Math.PI)
 }
 
@@ -86,7 +87,7 @@ function timesX(series: readonly number[]): number[] {
 }
 
 function integral(series: readonly number[], n: number, from: number, to: number): number {
-  const cosine = (m: number): number => (m === 0 ? to - from : (Math.sin(m * to) - Math.sin(m * from)) / m)
+  const cosine = (m: number): number => (m === 0 ? to - from : (sin(m * to) - sin(m * from)) / m)
   return series.reduce((sum, value, m) => sum + 0.5 * value * (cosine(m + n) + cosine(Math.abs(m - n))), 0)
 }
 
@@ -98,7 +99,7 @@ function pointCoefficients(section: Section): Triple {
   for (let k = 0; k < STATIONS; k++) {
     const slope = (y[k + 1] - y[k]) / (x[k + 1] - x[k])
     const theta = (k + 0.5) * step
-    for (const n of [0, 1, 2] as const) sums[n] += slope * Math.cos(n * theta) * step
+    for (const n of [0, 1, 2] as const) sums[n] += slope * cos(n * theta) * step
   }
   return sums
 }

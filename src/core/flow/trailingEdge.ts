@@ -1,3 +1,4 @@
+import { atan2, hypot, log } from '../numerics/elementary'
 import type { Panels } from '../shape/panels'
 
 /** The trailing edge of panels: the gap from the lower edge to the upper one and the way the flow leaves. */
@@ -28,7 +29,7 @@ export function trailingEdgeOf({ x, y }: Panels): TrailingEdge {
   const [bisectorX, bisectorY] = unit(upper[0] + lower[0], upper[1] + lower[1])
   const gapX = x[0] - x[n]
   const gapY = y[0] - y[n]
-  const gap = Math.hypot(gapX, gapY)
+  const gap = hypot(gapX, gapY)
   const sharp = gap < SHARP
   const across = sharp ? 0 : (bisectorX * gapY - bisectorY * gapX) / gap
   const along = sharp ? 0 : (bisectorX * gapX + bisectorY * gapY) / gap
@@ -36,7 +37,7 @@ export function trailingEdgeOf({ x, y }: Panels): TrailingEdge {
 }
 
 function unit(x: number, y: number): [number, number] {
-  const size = Math.hypot(x, y)
+  const size = hypot(x, y)
   return [x / size, y / size]
 }
 
@@ -56,12 +57,13 @@ export function gapInfluence(panels: Panels, edge: TrailingEdge, px: number, py:
   const angle = (dx: number, dy: number): number => {
     if (dx === 0 && dy === 0) return 0
     const counterclockwise = edge.bisectorY * dx - edge.bisectorX * dy
-    return Math.atan2(counterclockwise, -edge.bisectorX * dx - edge.bisectorY * dy)
+    return atan2(counterclockwise, -edge.bisectorX * dx - edge.bisectorY * dy)
   }
   const start = angle(px - x[n], py - y[n])
   const end = angle(px - x[0], py - y[0])
-  const log = (w: number): number => (w * w + above * above > 0 ? Math.log(w * w + above * above) : 0)
-  const ofSources = place * start - beyond * end + 0.5 * above * (log(place) - log(beyond))
-  const ofVorticity = 0.5 * (place * log(place) - beyond * log(beyond)) - h + above * (end - start)
+  const logarithm = (w: number): number => (w * w + above * above > 0 ? log(w * w + above * above) : 0)
+  const ofSources = place * start - beyond * end + 0.5 * above * (logarithm(place) - logarithm(beyond))
+  const ofVorticity =
+    0.5 * (place * logarithm(place) - beyond * logarithm(beyond)) - h + above * (end - start)
   return (edge.source * ofSources + edge.vorticity * ofVorticity) / (2 * Math.PI)
 }

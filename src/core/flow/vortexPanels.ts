@@ -1,3 +1,4 @@
+import { hypot } from '../numerics/elementary'
 import { factorInPlace, solveInPlace } from '../numerics/denseSolve'
 import type { Panels } from '../shape/panels'
 import { loadWeights, type LoadWeights } from './loadWeights'
@@ -86,7 +87,7 @@ export function solvePanels(panels: Panels): PanelFlow {
 function edgeRow({ x, y }: Panels, row: Float64Array): void {
   const n = x.length - 1
   const distance = (k: number): number =>
-    0.5 * (Math.hypot(x[k] - x[0], y[k] - y[0]) + Math.hypot(x[n - k] - x[n], y[n - k] - y[n]))
+    0.5 * (hypot(x[k] - x[0], y[k] - y[0]) + hypot(x[n - k] - x[n], y[n - k] - y[n]))
   const near = distance(1)
   const far = distance(2)
   row[0] = 1

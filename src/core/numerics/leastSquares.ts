@@ -1,3 +1,4 @@
+import { power } from './elementary'
 import { factorInPlace, solveInPlace } from './denseSolve'
 
 /**
@@ -18,8 +19,8 @@ export function leastSquaresPolynomial(
   for (let i = 0; i < x.length; i++) {
     const u = (x[i] - middle) / half
     for (let row = 0; row < size; row++) {
-      coefficients[row] += u ** row * y[i]
-      for (let column = 0; column < size; column++) matrix[row * size + column] += u ** (row + column)
+      coefficients[row] += power(u, row) * y[i]
+      for (let column = 0; column < size; column++) matrix[row * size + column] += power(u, row + column)
     }
   }
   solveInPlace(factorInPlace(matrix, size), coefficients)

@@ -1,3 +1,4 @@
+import { power } from '../numerics/elementary'
 import type { Polar } from './polar'
 
 /** What a linear lifting line needs of a section. */
@@ -36,7 +37,7 @@ export function liftLine(polar: Polar): SectionLine | null {
     for (const { alpha, liftCoefficient } of points) {
       if (liftCoefficient! < LOWEST_LIFT || liftCoefficient! > HIGHEST_LIFT) continue
       moments += (alpha - zeroLift) * liftCoefficient!
-      weights += (alpha - zeroLift) ** 2
+      weights += power(alpha - zeroLift, 2)
     }
     return {
       slope: moments / weights,

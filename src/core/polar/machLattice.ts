@@ -1,3 +1,4 @@
+import { power } from '../numerics/elementary'
 import type { Method, Polar, PolarPoint } from './polar'
 
 /** The free-stream Mach numbers at which polars are computed; between them they are interpolated. */
@@ -23,7 +24,7 @@ export function machBracket(method: Method, mach: number): MachBracket {
   const low = MACH_LATTICE[k]
   const high = MACH_LATTICE[k + 1]
   if (mach === low) return { low, high: low, fraction: 0 }
-  return { low, high, fraction: (mach ** 2 - low ** 2) / (high ** 2 - low ** 2) }
+  return { low, high, fraction: (power(mach, 2) - power(low, 2)) / (power(high, 2) - power(low, 2)) }
 }
 
 /**

@@ -1,3 +1,4 @@
+import { hypot, power } from '../numerics/elementary'
 import { bisect } from '../numerics/roots'
 import { cubicSpline, evaluate, type Spline } from '../numerics/spline'
 import type { Section } from './section'
@@ -22,7 +23,7 @@ const ARC_LENGTH_ROUNDS = 2
 export function contourOf(section: Pick<Section, 'x' | 'y'>): Contour {
   const { x, y } = withoutRepeats(section)
   let s = new Float64Array(x.length)
-  for (let i = 1; i < x.length; i++) s[i] = s[i - 1] + Math.hypot(x[i] - x[i - 1], y[i] - y[i - 1])
+  for (let i = 1; i < x.length; i++) s[i] = s[i - 1] + hypot(x[i] - x[i - 1], y[i] - y[i - 1])
   let curve = { x: cubicSpline(s, x), y: cubicSpline(s, y) }
   for (let round = 0; round < ARC_LENGTH_ROUNDS; round++) {
     s = arcLengths(curve.x, curve.y)
@@ -53,7 +54,7 @@ function arcLengths(x: Spline, y: Spline): Float64Array<ArrayBuffer> {
     let length = 0
     for (const [place, weight] of GAUSS_5) {
       const at = x.s[i - 1] + place * h
-      length += weight * h * Math.hypot(evaluate(x, at).first, evaluate(y, at).first)
+      length += weight * h * hypot(evaluate(x, at).first, evaluate(y, at).first)
     }
     s[i] = s[i - 1] + length
   }
@@ -67,7 +68,7 @@ function noseOf(x: Spline, y: Spline): number {
   let farthest = 0
   let best = -1
   for (let i = 0; i <= last; i++) {
-    const distance = Math.hypot(x.f[i] - edgeX, y.f[i] - edgeY)
+    const distance = hypot(x.f[i] - edgeX, y.f[i] - edgeY)
     if (distance > best) [farthest, best] = [i, distance]
   }
   const leaving = (s: number): number => {
@@ -93,13 +94,13 @@ export interface ContourPoint {
 export function pointAt(contour: Contour, s: number): ContourPoint {
   const x = evaluate(contour.x, s)
   const y = evaluate(contour.y, s)
-  const speed = Math.hypot(x.first, y.first)
+  const speed = hypot(x.first, y.first)
   return {
     x: x.value,
     y: y.value,
     dx: x.first,
     dy: y.first,
-    curvature: (x.first * y.second - y.first * x.second) / speed ** 3,
+    curvature: (x.first * y.second - y.first * x.second) / power(speed, 3),
   }
 }
 

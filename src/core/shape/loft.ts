@@ -1,3 +1,4 @@
+import { cos } from '../numerics/elementary'
 import { contourOf, ordinateAt } from './contour'
 import type { Section } from './section'
 
@@ -16,7 +17,7 @@ export function loft(root: Section, tip: Section, share: number): Section {
   const x = new Float64Array(2 * STATIONS + 1)
   const y = new Float64Array(2 * STATIONS + 1)
   for (let k = 0; k <= STATIONS; k++) {
-    const at = 0.5 * (1 - Math.cos((Math.PI * k) / STATIONS))
+    const at = 0.5 * (1 - cos((Math.PI * k) / STATIONS))
     for (const [side, i] of [
       ['upper', STATIONS - k],
       ['lower', STATIONS + k],

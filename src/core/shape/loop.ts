@@ -1,3 +1,5 @@
+import { atan2, hypot } from '../numerics/elementary'
+
 /** Points in any order of a loop, as pairs. */
 export type Points = readonly (readonly [x: number, y: number])[]
 
@@ -11,7 +13,7 @@ export function closedLoop(raw: Points): { points: Points; dropped: number } {
   const xs = raw.map(([x]) => x)
   const extent = Math.max(...xs) - Math.min(...xs)
   const same = (a: readonly [number, number], b: readonly [number, number]): boolean =>
-    Math.hypot(a[0] - b[0], a[1] - b[1]) <= SAME * extent
+    hypot(a[0] - b[0], a[1] - b[1]) <= SAME * extent
   const points = raw.filter((point, i) => i === 0 || !same(point, raw[i - 1]))
   const repeated = raw.length - points.length
   if (points.length > 1 && same(points[0], points[points.length - 1])) points.pop()
@@ -43,8 +45,5 @@ function turnAt(points: Points, i: number): number {
   const [ax, ay] = points[(i + n - 1) % n]
   const [bx, by] = points[i]
   const [cx, cy] = points[(i + 1) % n]
-  return Math.atan2(
-    (bx - ax) * (cy - by) - (by - ay) * (cx - bx),
-    (bx - ax) * (cx - bx) + (by - ay) * (cy - by),
-  )
+  return atan2((bx - ax) * (cy - by) - (by - ay) * (cx - bx), (bx - ax) * (cx - bx) + (by - ay) * (cy - by))
 }

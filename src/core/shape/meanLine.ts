@@ -1,3 +1,4 @@
+import { cos, hypot } from '../numerics/elementary'
 import { leastSquaresPolynomial } from '../numerics/leastSquares'
 import { contourOf, pointAt, type Contour } from './contour'
 import { noseRadius } from './panels'
@@ -35,7 +36,7 @@ export function meanLineOf(section: Section, count: number): { x: Float64Array; 
   const x = new Float64Array(count + 1)
   const y = new Float64Array(count + 1)
   for (let k = 0; k <= count; k++) {
-    const share = 0.5 * (1 - Math.cos((Math.PI * k) / count))
+    const share = 0.5 * (1 - cos((Math.PI * k) / count))
     x[k] = nose.x + share * (edgeX - nose.x)
     y[k] = nose.y + share * (edgeY - nose.y)
   }
@@ -64,7 +65,7 @@ function sidePoints(contour: Contour, from: number, to: number): Side {
   const x = new Float64Array(SIDE_POINTS + 1)
   const y = new Float64Array(SIDE_POINTS + 1)
   for (let k = 0; k <= SIDE_POINTS; k++) {
-    const point = pointAt(contour, from + 0.5 * (1 - Math.cos((Math.PI * k) / SIDE_POINTS)) * (to - from))
+    const point = pointAt(contour, from + 0.5 * (1 - cos((Math.PI * k) / SIDE_POINTS)) * (to - from))
     x[k] = point.x
     y[k] = point.y
   }
@@ -77,7 +78,7 @@ function centreInPlace(x: Float64Array, y: Float64Array, upper: Side, lower: Sid
   let largest = 0
   for (let k = 1; k + 1 < x.length; k++) {
     const slope = slopeAt(x, before, k)
-    const size = Math.hypot(1, slope)
+    const size = hypot(1, slope)
     const above = distanceTo(upper, x[k], before[k], 1 / size, slope / size)
     const below = distanceTo(lower, x[k], before[k], 1 / size, slope / size)
     if (above === null || below === null) continue

@@ -1,3 +1,4 @@
+import { atan2, cos, hypot } from '../numerics/elementary'
 import { maximise } from '../numerics/roots'
 import { contourOf, ordinateAt, pointAt, type Contour } from './contour'
 import { noseRadius } from './panels'
@@ -41,7 +42,7 @@ export function measure(section: Section): Measures {
     maxCamber: up >= down ? up : -down,
     maxCamberAt: Math.max(up, down) < 1e-9 ? 0 : up >= down ? upAt : downAt,
     noseRadius: noseRadius(contour),
-    edgeGap: Math.hypot(x[0] - x[last], y[0] - y[last]),
+    edgeGap: hypot(x[0] - x[last], y[0] - y[last]),
     edgeAngle: edgeAngle(contour),
     area: enclosedArea(contour),
   }
@@ -65,7 +66,7 @@ function camberOf(contour: Contour, x: number): number {
 }
 
 function largest(f: (x: number) => number): [value: number, at: number] {
-  const place = (k: number): number => 0.5 * (1 - Math.cos((Math.PI * k) / LOOKS))
+  const place = (k: number): number => 0.5 * (1 - cos((Math.PI * k) / LOOKS))
   let best = 1
   for (let k = 2; k < LOOKS; k++) if (f(place(k)) > f(place(best))) best = k
   const at = maximise(f, place(best - 1), place(best + 1))
@@ -75,9 +76,7 @@ function largest(f: (x: number) => number): [value: number, at: number] {
 function edgeAngle(contour: Contour): number {
   const upper = direction(contour, EDGE_STRETCH, 0)
   const lower = direction(contour, contour.length - EDGE_STRETCH, contour.length)
-  return Math.abs(
-    Math.atan2(upper[0] * lower[1] - upper[1] * lower[0], upper[0] * lower[0] + upper[1] * lower[1]),
-  )
+  return Math.abs(atan2(upper[0] * lower[1] - upper[1] * lower[0], upper[0] * lower[0] + upper[1] * lower[1]))
 }
 
 function direction(contour: Contour, from: number, to: number): [number, number] {

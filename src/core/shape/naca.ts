@@ -1,3 +1,4 @@
+import { atan, cos, power, sin } from '../numerics/elementary'
 import { BadInput } from '../numerics/errors'
 import type { Edge, MeanLine, Section } from './section'
 
@@ -57,8 +58,8 @@ function fourDigitLine(digits: string): MeanLine {
   if (p === 0) {
     throw new BadInput(`NACA ${digits}: camber needs its place; the second digit must be 1 to 9`)
   }
-  const ahead = m / p ** 2
-  const behind = m / (1 - p) ** 2
+  const ahead = m / power(p, 2)
+  const behind = m / power(1 - p, 2)
   return {
     joint: p,
     front: [0, 2 * p * ahead, -ahead],
@@ -74,17 +75,21 @@ function fiveDigitLine(digits: string): MeanLine {
   if (standard) {
     const [r, k1] = standard
     const k = (scale * k1) / 6
-    return { joint: r, front: [0, k * r * r * (3 - r), -3 * k * r, k], rear: [k * r ** 3, -k * r ** 3] }
+    return {
+      joint: r,
+      front: [0, k * r * r * (3 - r), -3 * k * r, k],
+      rear: [k * power(r, 3), -k * power(r, 3)],
+    }
   }
   const reflexed = REFLEXED[line]
   if (reflexed) {
     const [r, k1, ratio] = reflexed
     const k = (scale * k1) / 6
-    const fall = ratio * (1 - r) ** 3 + r ** 3
+    const fall = ratio * power(1 - r, 3) + power(r, 3)
     return {
       joint: r,
       front: [0, k * (3 * r * r - fall), -3 * k * r, k],
-      rear: [k * r ** 3 * (1 - ratio), k * (3 * ratio * r * r - fall), -3 * k * ratio * r, k * ratio],
+      rear: [k * power(r, 3) * (1 - ratio), k * (3 * ratio * r * r - fall), -3 * k * ratio * r, k * ratio],
     }
   }
   throw new BadInput(
@@ -98,16 +103,16 @@ function outline(line: MeanLine, thickness: number, edge: Edge): { x: Float64Arr
   const y = new Float64Array(2 * n + 1)
   const last = edge === 'closed' ? -0.1036 : -0.1015
   for (let i = 0; i <= n; i++) {
-    const root = Math.sin((Math.PI * i) / (2 * n)) // square root of the station
+    const root = sin((Math.PI * i) / (2 * n)) // square root of the station
     const at = i === n ? 1 : root * root
     const half = 5 * thickness * (0.2969 * root + at * (-0.126 + at * (-0.3516 + at * (0.2843 + at * last))))
     const camber = meanLineAt(line, at)
     const across = i === n && edge === 'closed' ? 0 : half
-    const lean = Math.atan(camber.slope)
-    x[n - i] = at - across * Math.sin(lean)
-    y[n - i] = camber.height + across * Math.cos(lean)
-    x[n + i] = at + across * Math.sin(lean)
-    y[n + i] = camber.height - across * Math.cos(lean)
+    const lean = atan(camber.slope)
+    x[n - i] = at - across * sin(lean)
+    y[n - i] = camber.height + across * cos(lean)
+    x[n + i] = at + across * sin(lean)
+    y[n + i] = camber.height - across * cos(lean)
   }
   return { x, y }
 }

@@ -1,3 +1,4 @@
+import { atan2, cos, hypot, power, sin } from '../numerics/elementary'
 import { bisect } from '../numerics/roots'
 import { BadInput } from '../numerics/errors'
 import { evaluate } from '../numerics/spline'
@@ -55,7 +56,7 @@ export function sectionFromPoints(
   const placed = place(points, options.chordLine)
   const { x, y, turned, chord, longestChordAngle } = placed
   const last = x.length - 1
-  const edgeGap = Math.hypot(x[0] - x[last], y[0] - y[last])
+  const edgeGap = hypot(x[0] - x[last], y[0] - y[last])
   if (!(edgeGap < WIDEST_GAP)) {
     throw new BadInput(
       `the trailing edge is ${(100 * edgeGap).toFixed(0)} % of the chord thick; give less than 20 %`,
@@ -143,16 +144,17 @@ function place(points: Points, chordLine: ChordLine | null): Placed {
   const contour = contourOf({ x, y })
   const noseX = evaluate(contour.x, contour.nose).value
   const noseY = evaluate(contour.y, contour.nose).value
-  const longest = Math.hypot(edgeX - noseX, edgeY - noseY)
+  const longest = hypot(edgeX - noseX, edgeY - noseY)
   if (!(longest > 0)) throw new BadInput('the chord has no length')
-  if (signedArea(points) < SMALLEST_AREA * longest ** 2) throw new BadInput('the outline encloses no area')
-  const angle = Math.atan2(noseY - edgeY, edgeX - noseX)
+  if (signedArea(points) < SMALLEST_AREA * power(longest, 2))
+    throw new BadInput('the outline encloses no area')
+  const angle = atan2(noseY - edgeY, edgeX - noseX)
   const turned = chordLine === 'longest' || (chordLine === null && Math.abs(angle) > LEVEL)
   const foremost = foremostX(contour.x.s, contour.x.f, (s) => evaluate(contour.x, s))
   if (!turned && !(edgeX > foremost)) throw new BadInput('the nose does not point to smaller x')
   const chord = turned ? longest : edgeX - foremost
-  const c = turned ? Math.cos(angle) : 1
-  const s = turned ? Math.sin(angle) : 0
+  const c = turned ? cos(angle) : 1
+  const s = turned ? sin(angle) : 0
   return {
     x: x.map((value, i) => 1 + ((value - edgeX) * c - (y[i] - edgeY) * s) / chord),
     y: y.map((value, i) => ((x[i] - edgeX) * s + (value - edgeY) * c) / chord),

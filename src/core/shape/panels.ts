@@ -1,3 +1,4 @@
+import { atan2, power, sin } from '../numerics/elementary'
 import { BadInput } from '../numerics/errors'
 import { contourOf, pointAt, type Contour } from './contour'
 import type { Section } from './section'
@@ -61,7 +62,7 @@ export function placePanels(section: Pick<Section, 'x' | 'y'>, count: number = D
 /** Running integral `share` of the panel density along the arc lengths `s` of both sides. */
 function panelDensity(contour: Contour, count: number): { s: Float64Array; share: Float64Array } {
   const r = Math.max(noseRadius(contour), LEAST_NOSE_RADIUS)
-  const d0 = (EDGE_SOFTENING * 0.5 * contour.length * Math.PI ** 2) / count ** 2
+  const d0 = (EDGE_SOFTENING * 0.5 * contour.length * power(Math.PI, 2)) / power(count, 2)
   const total = 2 * DENSITY_POINTS
   const s = new Float64Array(total + 1)
   const share = new Float64Array(total + 1)
@@ -72,7 +73,7 @@ function panelDensity(contour: Contour, count: number): { s: Float64Array; share
   for (let k = 1; k <= total; k++) {
     const length = k <= DENSITY_POINTS ? sides[0] : sides[1]
     const t = k <= DENSITY_POINTS ? k / DENSITY_POINTS : (total - k) / DENSITY_POINTS
-    const d = length * Math.sin(0.5 * Math.PI * t) ** 2
+    const d = length * power(sin(0.5 * Math.PI * t), 2)
     s[k] = k <= DENSITY_POINTS ? d : contour.length - d
     const here = density(d, length - d)
     share[k] = share[k - 1] + 0.5 * (before + here) * (s[k] - s[k - 1])
@@ -86,7 +87,7 @@ export function noseRadius(contour: Contour): number {
   const reach = 0.003
   const before = pointAt(contour, contour.nose - reach)
   const after = pointAt(contour, contour.nose + reach)
-  const turned = Math.atan2(
+  const turned = atan2(
     before.dx * after.dy - before.dy * after.dx,
     before.dx * after.dx + before.dy * after.dy,
   )

@@ -1,3 +1,4 @@
+import { power } from '../numerics/elementary'
 import { contourOf, ordinateAt, type Side } from './contour'
 import type { Section } from './section'
 
@@ -38,7 +39,7 @@ export function waviness(section: Section): Waviness {
   let sum = 0
   let count = 0
   for (const side of ['upper', 'lower'] as const) {
-    const places = Array.from({ length: STATIONS }, (_, k) => (0.17 + (0.82 * k) / (STATIONS - 1)) ** 2)
+    const places = Array.from({ length: STATIONS }, (_, k) => power(0.17 + (0.82 * k) / (STATIONS - 1), 2))
     const heights = places.map((x) => (ordinateAt(contour, side, x) ?? 0) * (side === 'upper' ? 1 : -1))
     const departures = heights.map((_, k) => departure(heights, k))
     departures.forEach((value, k) => {
@@ -68,13 +69,13 @@ const SMOOTHING: readonly number[] = (() => {
   return Array.from({ length: 2 * m + 1 }, (_, j) => {
     const i = j - m
     const top =
-      15 * m ** 4 +
-      30 * m ** 3 -
-      35 * m ** 2 -
+      15 * power(m, 4) +
+      30 * power(m, 3) -
+      35 * power(m, 2) -
       50 * m +
       12 -
-      35 * (2 * m ** 2 + 2 * m - 3) * i ** 2 +
-      63 * i ** 4
+      35 * (2 * power(m, 2) + 2 * m - 3) * power(i, 2) +
+      63 * power(i, 4)
     return top / scale
   })
 })()

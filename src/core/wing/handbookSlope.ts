@@ -1,3 +1,4 @@
+import { power, tan } from '../numerics/elementary'
 import type { QuickSlope } from './helmbold'
 
 /** What the handbook formula needs of a wing. */
@@ -16,8 +17,8 @@ export interface HandbookWing {
  * Source: USAF Stability and Control Datcom, AFWAL-TR-83-3048 (1978), section 4.1.3.2.
  */
 export function handbookSlope({ aspectRatio, mach, kappa, sweepHalfChord }: HandbookWing): QuickSlope {
-  const beta = Math.sqrt(1 - Math.min(mach, 0.95) ** 2)
-  const stretched = ((aspectRatio * beta) / kappa) ** 2 * (1 + (Math.tan(sweepHalfChord) / beta) ** 2)
+  const beta = Math.sqrt(1 - power(Math.min(mach, 0.95), 2))
+  const stretched = power((aspectRatio * beta) / kappa, 2) * (1 + power(tan(sweepHalfChord) / beta, 2))
   return {
     slope: (2 * Math.PI * aspectRatio) / (2 + Math.sqrt(stretched + 4)),
     warning: mach > 0.7 ? 'the handbook slope holds below the drag rise, to Mach 0.7 or so' : '',

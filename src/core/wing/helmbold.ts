@@ -1,3 +1,5 @@
+import { power } from '../numerics/elementary'
+
 /** A lift slope with a plain warning when the formula is used outside its range; empty when inside. */
 export interface QuickSlope {
   /** Wing lift slope, per rad. */
@@ -13,7 +15,7 @@ export interface QuickSlope {
  */
 export function helmboldSlope(aspectRatio: number): QuickSlope {
   return {
-    slope: (2 * Math.PI * aspectRatio) / (2 + Math.sqrt(aspectRatio ** 2 + 4)),
+    slope: (2 * Math.PI * aspectRatio) / (2 + Math.sqrt(power(aspectRatio, 2) + 4)),
     warning: aspectRatio > 8 ? "Helmbold's formula is meant for low aspect ratios, up to about 8" : '',
   }
 }

@@ -1,3 +1,4 @@
+import { acos, cos, power, sin } from '../numerics/elementary'
 import { factorInPlace, solveInPlace } from '../numerics/denseSolve'
 
 /** A wing for the lifting line. Functions of the distance y from the centreline (m), on one half. */
@@ -55,8 +56,8 @@ export function solveLiftingLine(input: LiftingLineInput, terms: number = TERMS)
   const atZero = new Float64Array(terms)
   const sines = new Float64Array(terms)
   for (const [theta, weight] of quadrature(input)) {
-    const y = 0.5 * span * Math.cos(theta)
-    for (let k = 0; k < terms; k++) sines[k] = Math.sin((2 * k + 1) * theta)
+    const y = 0.5 * span * cos(theta)
+    for (let k = 0; k < terms; k++) sines[k] = sin((2 * k + 1) * theta)
     const stiffness = (weight * 4 * span * sines[0]) / (input.chord(y) * input.slope(y))
     const set = input.set(y)
     for (let row = 0; row < terms; row++) {
@@ -78,8 +79,8 @@ function* quadrature({
   breaks,
 }: LiftingLineInput): Generator<readonly [theta: number, weight: number]> {
   for (let k = 0; k + 1 < breaks.length; k++) {
-    const from = Math.acos(Math.min(breaks[k + 1] / (0.5 * span), 1))
-    const to = Math.acos(breaks[k] / (0.5 * span))
+    const from = acos(Math.min(breaks[k + 1] / (0.5 * span), 1))
+    const to = acos(breaks[k] / (0.5 * span))
     const pieces = Math.ceil((to - from) / PIECE)
     const step = (to - from) / pieces
     for (let piece = 0; piece < pieces; piece++) {
@@ -104,7 +105,7 @@ export function rootAngleForLift(line: LiftingLine, liftCoefficient: number): nu
 }
 
 function aspectRatio({ input }: LiftingLine): number {
-  return input.span ** 2 / input.area
+  return power(input.span, 2) / input.area
 }
 
 /** Wing totals at a root angle (rad). */
@@ -131,7 +132,7 @@ export function wingLiftAt(line: LiftingLine, alpha: number): WingLift {
   return {
     liftCoefficient: slender * a[0],
     inducedDragCoefficient: slender * induced,
-    rootMomentOverPressure: span ** 3 * moment,
+    rootMomentOverPressure: power(span, 3) * moment,
   }
 }
 
@@ -146,10 +147,10 @@ export function localLift(
   y: number,
 ): { liftCoefficient: number; inducedAngle: number } {
   const { span, chord, slope, set } = line.input
-  const theta = Math.acos(Math.min((2 * y) / span, 1))
+  const theta = acos(Math.min((2 * y) / span, 1))
   const a = coefficientsAt(line, alpha)
   let sum = 0
-  for (let k = 0; k < a.length; k++) sum += a[k] * Math.sin((2 * k + 1) * theta)
+  for (let k = 0; k < a.length; k++) sum += a[k] * sin((2 * k + 1) * theta)
   const liftCoefficient = (4 * span * sum) / chord(y)
   return { liftCoefficient, inducedAngle: alpha + set(y) - liftCoefficient / slope(y) }
 }

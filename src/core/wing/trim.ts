@@ -1,3 +1,4 @@
+import { tan } from '../numerics/elementary'
 import type { MeanChord } from './planform'
 
 /** Where the wing's lift and moment act; lengths aft of the quarter chord of the root, m. */
@@ -26,7 +27,7 @@ export interface MomentStrip {
  * where the line is swept. Source: Anderson, NACA Report 572 (1936), equations 10 to 14.
  */
 export function wingMoment(strips: readonly MomentStrip[], sweepQuarterChord: number): WingMoment {
-  const aft = Math.tan(sweepQuarterChord)
+  const aft = tan(sweepQuarterChord)
   let lift = 0
   let first = 0
   let moment = 0
@@ -60,7 +61,7 @@ export interface TrimInput {
 export function tailLoad(input: TrimInput): number | null {
   if (input.tailArm === null) return null
   const { moment, meanChord } = input
-  const quarter = meanChord.y * Math.tan(input.sweepQuarterChord)
+  const quarter = meanChord.y * tan(input.sweepQuarterChord)
   const lever =
     input.centreOfGravity === null
       ? 0

@@ -1,3 +1,4 @@
+import { atan, cos, power, sin, tan } from '../numerics/elementary'
 import { flightState, reynoldsNumber, whyUnflyable, type FlightInput } from '../flight/conditions'
 import { BadInput } from '../numerics/errors'
 import type { SectionLine } from '../polar/liftLine'
@@ -112,7 +113,7 @@ export function wingAt(input: WingInput): WingAtCondition {
     station.liftCoefficient > best.liftCoefficient ? station : best,
   )
   const mach = condition.speed / flight.air.speedOfSound
-  const aspectRatio = shape.span ** 2 / shape.area
+  const aspectRatio = power(shape.span, 2) / shape.area
   const quick = quickSlopes(input, aspectRatio, mach)
   return {
     temperature: flight.air.temperature,
@@ -132,7 +133,7 @@ export function wingAt(input: WingInput): WingAtCondition {
     spanEfficiency:
       Math.abs(liftCoefficient) < SMALLEST_LIFT_FOR_EFFICIENCY
         ? null
-        : liftCoefficient ** 2 / (Math.PI * aspectRatio * totals.inducedDragCoefficient),
+        : power(liftCoefficient, 2) / (Math.PI * aspectRatio * totals.inducedDragCoefficient),
     inducedDragCoefficient: totals.inducedDragCoefficient,
     inducedDrag: totals.inducedDragCoefficient * q * shape.area,
     tailLoad: tail,
@@ -161,7 +162,7 @@ function between(input: WingInput, y: number, of: (line: SectionLine) => number)
 
 function lineOf(input: WingInput): LiftingLine {
   const { stations, span, area, sweepQuarterChord } = input.shape
-  const cosine = Math.cos(sweepQuarterChord)
+  const cosine = cos(sweepQuarterChord)
   return solveLiftingLine({
     span,
     area,
@@ -180,7 +181,7 @@ function stationStates(
 ): StationState[] {
   const { stations, span } = input.shape
   return Array.from({ length: STATIONS }, (_, k) => {
-    const y = k === STATIONS - 1 ? 0.5 * span : 0.5 * span * Math.sin((Math.PI * k) / (2 * (STATIONS - 1)))
+    const y = k === STATIONS - 1 ? 0.5 * span : 0.5 * span * sin((Math.PI * k) / (2 * (STATIONS - 1)))
     const { chord, twist } = stationAt(stations, y)
     return { y, chord, twist, ...localLift(line, alpha, y), reynolds: reynoldsOf(chord) }
   })
@@ -195,11 +196,11 @@ function strips(input: WingInput, line: LiftingLine): MomentStrip[] {
   return Array.from({ length: count }, (_, k) => {
     const step = Math.PI / (2 * count)
     const theta = (k + 0.5) * step
-    const y = 0.5 * span * Math.cos(theta)
+    const y = 0.5 * span * cos(theta)
     const basicLift = localLift(line, atNone, y).liftCoefficient
     return {
       y,
-      width: 0.5 * span * Math.sin(theta) * step,
+      width: 0.5 * span * sin(theta) * step,
       chord: stationAt(stations, y).chord,
       momentAtZeroLift: between(input, y, (of) => of.momentAtZeroLift),
       basicLift,
@@ -209,10 +210,10 @@ function strips(input: WingInput, line: LiftingLine): MomentStrip[] {
 }
 
 function quickSlopes(input: WingInput, aspectRatio: number, mach: number) {
-  const meanSlope = 0.5 * (input.root.slope + input.tip.slope) * Math.sqrt(1 - Math.min(mach, 0.95) ** 2)
+  const meanSlope = 0.5 * (input.root.slope + input.tip.slope) * Math.sqrt(1 - power(Math.min(mach, 0.95), 2))
   const { stations, span, sweepQuarterChord } = input.shape
   const tapering = (stations[0].chord - stations[stations.length - 1].chord) / (0.5 * span)
-  const sweepHalfChord = Math.atan(Math.tan(sweepQuarterChord) - 0.25 * tapering)
+  const sweepHalfChord = atan(tan(sweepQuarterChord) - 0.25 * tapering)
   return {
     helmbold: helmboldSlope(aspectRatio),
     handbook: handbookSlope({ aspectRatio, mach, kappa: meanSlope / (2 * Math.PI), sweepHalfChord }),

@@ -1,3 +1,4 @@
+import { log } from '../../numerics/elementary'
 import { BadInput } from '../../numerics/errors'
 
 /**
@@ -13,5 +14,5 @@ export function criticalAmplification(percent: number): number {
       `free-stream turbulence is ${percent} %; Mack's relation holds from 0.07 to 2.98 %: give a value inside, or the amplification N itself`,
     )
   // At 2.98 % the relation gives -0.0004: N cannot be negative.
-  return Math.max(0, -8.43 - 2.4 * Math.log(percent / 100))
+  return Math.max(0, -8.43 - 2.4 * log(percent / 100))
 }

@@ -1,3 +1,5 @@
+import { log, tanh } from '../../numerics/elementary'
+
 /**
  * Envelope of the spatially amplified Tollmien-Schlichting waves of self-similar layers: rate of growth of
  * the amplification exponent N, and the Reynolds number of its onset.
@@ -8,7 +10,7 @@
 
 /** dN/dR as a function of the shape factor H; writes [value, derivative]. */
 export function envelopeGrowth(H: number, out: Float64Array): void {
-  const th = Math.tanh(1.5 * H - 4.65)
+  const th = tanh(1.5 * H - 4.65)
   const z = 2.4 * H - 3.7 + 2.5 * th
   const root = Math.sqrt(z * z + 0.25)
   out[0] = 0.01 * root
@@ -18,7 +20,7 @@ export function envelopeGrowth(H: number, out: Float64Array): void {
 /** Decimal logarithm of the R at which amplification begins; writes [value, derivative with respect to H]. */
 export function envelopeOnset(H: number, out: Float64Array): void {
   const z = 1 / (H - 1)
-  const th = Math.tanh(20 * z - 12.9)
+  const th = tanh(20 * z - 12.9)
   const a = 1.415 * z - 0.489
   out[0] = a * th + 3.295 * z + 0.44
   out[1] = -z * z * (1.415 * th + a * 20 * (1 - th * th) + 3.295)
@@ -34,7 +36,7 @@ const ONSET_WIDTH = 0.06
  */
 export function amplificationRate(H: number, R: number, out: Float64Array): void {
   envelopeOnset(H, out)
-  const p = (Math.log(R) / Math.LN10 - out[0]!) / (2 * ONSET_WIDTH) + 0.5
+  const p = (log(R) / Math.LN10 - out[0]!) / (2 * ONSET_WIDTH) + 0.5
   if (p <= 0) {
     out[0] = out[1] = out[2] = 0
     return

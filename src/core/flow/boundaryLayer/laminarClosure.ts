@@ -1,3 +1,5 @@
+import { power } from '../../numerics/elementary'
+
 /**
  * Laminar closure of the two-equation integral method: energy shape factor, friction and dissipation as
  * functions of the kinematic shape factor H.
@@ -34,7 +36,7 @@ export function laminarFriction(H: number, out: Float64Array): void {
 export function laminarDissipation(H: number, out: Float64Array): void {
   if (H < 4) {
     const z = 4 - H
-    const p = 0.00205 * z ** 4.5
+    const p = 0.00205 * power(z, 4.5)
     out[0] = 0.207 + p * z
     out[1] = -5.5 * p
   } else {

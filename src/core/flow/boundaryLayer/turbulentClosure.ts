@@ -1,3 +1,5 @@
+import { exp, log, power, tanh } from '../../numerics/elementary'
+
 /**
  * Turbulent closure of the two-equation integral method.
  *
@@ -22,7 +24,7 @@ export function turbulentEnergyShape(H: number, R: number, out: Float64Array): v
     const z = H0 - H
     const root = Math.sqrt(r)
     const a = 0.165 - 1.6 / root
-    const p = z ** 0.6
+    const p = power(z, 0.6)
     const f = (p * z) / H
     const fz = (1.6 * p) / H
     out[0] = 1.505 + 4 / r + a * f
@@ -30,7 +32,7 @@ export function turbulentEnergyShape(H: number, R: number, out: Float64Array): v
     slopeR += (0.8 / (r * root)) * f + a * fz * dH0
   } else {
     const z = H - H0
-    const ln = Math.log(r)
+    const ln = log(r)
     const b = z + 4 / ln
     const g = 0.04 / H + (0.007 * ln) / (b * b)
     const gb = (-0.014 * ln) / (b * b * b)
@@ -45,12 +47,12 @@ export function turbulentEnergyShape(H: number, R: number, out: Float64Array): v
 /** Friction coefficient c_f. */
 export function turbulentFriction(H: number, R: number, out: Float64Array): void {
   const r = Math.max(R, LEAST_R)
-  const lg = Math.log(r) / Math.LN10
+  const lg = log(r) / Math.LN10
   const exponent = -1.74 - 0.31 * H
-  const main = 0.3 * Math.exp(-1.33 * H) * lg ** exponent
-  const th = Math.tanh(4 - H / 0.875)
+  const main = 0.3 * exp(-1.33 * H) * power(lg, exponent)
+  const th = tanh(4 - H / 0.875)
   out[0] = main + 0.00011 * (th - 1)
-  out[1] = main * (-1.33 - 0.31 * Math.log(lg)) - (0.00011 / 0.875) * (1 - th * th)
+  out[1] = main * (-1.33 - 0.31 * log(lg)) - (0.00011 / 0.875) * (1 - th * th)
   out[2] = R > LEAST_R ? (main * exponent) / (lg * r * Math.LN10) : 0
 }
 
