@@ -24,6 +24,8 @@ export default defineConfig({
       outDir: 'out/main',
       reportCompressedSize: false,
       rollupOptions: {
+        // Only the bench of the window uses it, where it is installed.
+        external: ['playwright-core'],
         input: {
           index: 'src/main/index.ts',
           cli: 'src/cli/index.ts',

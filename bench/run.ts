@@ -55,7 +55,10 @@ function read(args: readonly string[]): { json: string | undefined; names: strin
 async function one(name: string): Promise<Result> {
   const made = await benches.find((bench) => bench.name === name)?.make()
   if (made === undefined) return notHere(`no bench is named ${name}`)
-  return 'run' in made ? measure(made) : notHere(made.note)
+  if (!('run' in made)) return notHere(made.note)
+  const figures = await measure(made)
+  await made.stop?.()
+  return figures
 }
 
 function notHere(note: string): Result {

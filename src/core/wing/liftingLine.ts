@@ -57,21 +57,38 @@ export function solveLiftingLine(input: LiftingLineInput, terms: number = TERMS)
   const sines = new Float64Array(terms)
   for (const [theta, weight] of quadrature(input)) {
     const y = 0.5 * span * cos(theta)
-    for (let k = 0; k < terms; k++) sines[k] = sin((2 * k + 1) * theta)
+    oddSinesInPlace(sines, theta)
     const stiffness = (weight * 4 * span * sines[0]) / (input.chord(y) * input.slope(y))
     const set = input.set(y)
     for (let row = 0; row < terms; row++) {
       const weighted = stiffness * sines[row]
-      for (let column = 0; column < terms; column++) matrix[row * terms + column] += weighted * sines[column]
+      for (let column = 0; column <= row; column++) matrix[row * terms + column] += weighted * sines[column]
       perAngle[row] += weight * sines[0] * sines[row]
       atZero[row] += weight * sines[0] * sines[row] * set
     }
   }
-  for (let k = 0; k < terms; k++) matrix[k * terms + k] += ((2 * k + 1) * Math.PI) / 4
+  for (let row = 0; row < terms; row++) {
+    for (let column = 0; column < row; column++) matrix[column * terms + row] = matrix[row * terms + column]
+    matrix[row * terms + row] += ((2 * row + 1) * Math.PI) / 4
+  }
   const factors = factorInPlace(matrix, terms)
   solveInPlace(factors, perAngle)
   solveInPlace(factors, atZero)
   return { input, perAngle, atZero }
+}
+
+/** Sines of theta, 3 theta, 5 theta and so on, by the recurrence of Chebyshev. */
+function oddSinesInPlace(sines: Float64Array, theta: number): Float64Array {
+  const twice = 2 * cos(2 * theta)
+  let before = -sin(theta)
+  let here = -before
+  for (let k = 0; k < sines.length; k++) {
+    sines[k] = here
+    const next = twice * here - before
+    before = here
+    here = next
+  }
+  return sines
 }
 
 function* quadrature({
@@ -138,19 +155,20 @@ export function wingLiftAt(line: LiftingLine, alpha: number): WingLift {
 
 /**
  * Local lift coefficient and induced angle (rad, positive for downwash) at a distance y (m) from the
- * centreline. The induced angle follows from the section's own lift curve, which holds pointwise; its
+ * centreline; `coefficients` are those of the angle, for callers that need many places. The induced angle follows from the section's own lift curve, which holds pointwise; its
  * series converges too slowly near the tip.
  */
 export function localLift(
   line: LiftingLine,
   alpha: number,
   y: number,
+  coefficients: Float64Array = coefficientsAt(line, alpha),
 ): { liftCoefficient: number; inducedAngle: number } {
   const { span, chord, slope, set } = line.input
   const theta = acos(Math.min((2 * y) / span, 1))
-  const a = coefficientsAt(line, alpha)
+  const sines = oddSinesInPlace(new Float64Array(coefficients.length), theta)
   let sum = 0
-  for (let k = 0; k < a.length; k++) sum += a[k] * sin((2 * k + 1) * theta)
+  for (let k = 0; k < sines.length; k++) sum += coefficients[k] * sines[k]
   const liftCoefficient = (4 * span * sum) / chord(y)
   return { liftCoefficient, inducedAngle: alpha + set(y) - liftCoefficient / slope(y) }
 }

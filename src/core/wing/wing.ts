@@ -5,6 +5,7 @@ import type { SectionLine } from '../polar/liftLine'
 import { handbookSlope } from './handbookSlope'
 import { helmboldSlope } from './helmbold'
 import {
+  coefficientsAt,
   localLift,
   rootAngleForLift,
   solveLiftingLine,
@@ -180,31 +181,34 @@ function stationStates(
   reynoldsOf: (chord: number) => number,
 ): StationState[] {
   const { stations, span } = input.shape
+  const coefficients = coefficientsAt(line, alpha)
   return Array.from({ length: STATIONS }, (_, k) => {
     const y = k === STATIONS - 1 ? 0.5 * span : 0.5 * span * sin((Math.PI * k) / (2 * (STATIONS - 1)))
     const { chord, twist } = stationAt(stations, y)
-    return { y, chord, twist, ...localLift(line, alpha, y), reynolds: reynoldsOf(chord) }
+    return { y, chord, twist, ...localLift(line, alpha, y, coefficients), reynolds: reynoldsOf(chord) }
   })
 }
 
 /** Strips for the moment, at the middle angles of the cosine rule. */
 function strips(input: WingInput, line: LiftingLine): MomentStrip[] {
-  const count = 200
+  const count = 100
   const { stations, span } = input.shape
   const atNone = rootAngleForLift(line, 0)
   const atOne = rootAngleForLift(line, 1)
+  const none = coefficientsAt(line, atNone)
+  const one = coefficientsAt(line, atOne)
   return Array.from({ length: count }, (_, k) => {
     const step = Math.PI / (2 * count)
     const theta = (k + 0.5) * step
     const y = 0.5 * span * cos(theta)
-    const basicLift = localLift(line, atNone, y).liftCoefficient
+    const basicLift = localLift(line, atNone, y, none).liftCoefficient
     return {
       y,
       width: 0.5 * span * sin(theta) * step,
       chord: stationAt(stations, y).chord,
       momentAtZeroLift: between(input, y, (of) => of.momentAtZeroLift),
       basicLift,
-      additionalLift: localLift(line, atOne, y).liftCoefficient - basicLift,
+      additionalLift: localLift(line, atOne, y, one).liftCoefficient - basicLift,
     }
   })
 }
