@@ -54,12 +54,12 @@ const air = v.strictObject({
   amplification: maybe(within(0, 14)),
 })
 
-/** Speed, altitude and mass are judged condition by condition: one that cannot be flown is kept and marked. */
+/** Speed, load factor and mass are judged later: a condition that cannot be flown is kept and marked. */
 const condition = v.strictObject({
   name: words,
   speed_m_s: v.union([finite, v.literal('slowest')], 'must be a number or "slowest"'),
-  altitude_m: v.optional(finite, 0),
-  isa_offset_K: v.optional(finite, 0),
+  altitude_m: v.optional(within(-1000, 20000), 0),
+  isa_offset_K: v.optional(within(-80, 80), 0),
   load_factor: v.optional(finite, 1),
   mass_kg: maybe(finite),
   surface: v.optional(v.picklist(['clean', 'dirty'], 'must be "clean" or "dirty"'), 'clean'),

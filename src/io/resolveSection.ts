@@ -36,6 +36,7 @@ export function resolveSection(
     return { section: nacaSection(text.slice(5), { edge: options.edge ?? 'closed' }), warnings: [] }
   } catch (error) {
     if (!(error instanceof BadInput)) throw error
-    throw new FileProblem(text, null, error.message, 'correct the designation')
+    const [what, cure] = error.message.split(/; (?!.*; )/)
+    throw new FileProblem(text, null, what!, cure ?? 'correct the designation')
   }
 }

@@ -15,7 +15,7 @@ function conditionFields(comparison: Comparison, entry: ComparedEntry, state: En
   const { wing } = state
   return {
     name: comparison.conditions[i]!.name,
-    density_kg_m3: wing?.density ?? null,
+    density_kg_m3: comparison.densities[i]!,
     dynamic_pressure_Pa: wing?.dynamicPressure ?? null,
     wing_loading_kg_m2: wing?.wingLoadingMass ?? comparison.conditions[i]!.mass / comparison.wing.area,
     lift_coefficient: wing?.liftCoefficient ?? null,

@@ -1,3 +1,4 @@
+import { atmosphere } from '../flight/atmosphere'
 import { thinAirfoil } from '../flow/thinAirfoil'
 import type { Polar } from '../polar/polar'
 import { depthAt, measure } from '../shape/measures'
@@ -32,6 +33,7 @@ export function assemble(job: Job, known: Known): Comparison {
     wing: job.wing,
     stationY: stationOf(job),
     conditions: job.conditions,
+    densities: job.conditions.map(({ altitude, isaOffset }) => atmosphere(altitude, isaOffset).density),
     entries: job.entries.map((entry) => comparedEntry(job, entry, known)),
   }
 }

@@ -15,6 +15,8 @@ export interface Comparison {
   /** Distance of the shown station from the centreline, m. */
   readonly stationY: number
   readonly conditions: readonly Condition[]
+  /** Density of the air at each condition, kg/m3. */
+  readonly densities: readonly number[]
   readonly entries: readonly ComparedEntry[]
 }
 

@@ -21,7 +21,7 @@ export interface Measures {
 
 /** Abscissae of the first look for the largest thickness and camber. */
 const LOOKS = 80
-/** The edge angle is taken between the sides' secants over this last part of the chord. */
+/** The edge angle is that between the sides' secants, continued to the edge from those over 1 and 2 per cent. */
 const EDGE_STRETCH = 0.01
 
 /**
@@ -43,7 +43,7 @@ export function measure(section: Section): Measures {
     maxCamberAt: Math.max(up, down) < 1e-9 ? 0 : up >= down ? upAt : downAt,
     noseRadius: noseRadius(contour),
     edgeGap: hypot(x[0] - x[last], y[0] - y[last]),
-    edgeAngle: edgeAngle(contour),
+    edgeAngle: 2 * secantAngle(contour, EDGE_STRETCH) - secantAngle(contour, 2 * EDGE_STRETCH),
     area: enclosedArea(contour),
   }
 }
@@ -73,9 +73,9 @@ function largest(f: (x: number) => number): [value: number, at: number] {
   return [f(at), at]
 }
 
-function edgeAngle(contour: Contour): number {
-  const upper = direction(contour, EDGE_STRETCH, 0)
-  const lower = direction(contour, contour.length - EDGE_STRETCH, contour.length)
+function secantAngle(contour: Contour, stretch: number): number {
+  const upper = direction(contour, stretch, 0)
+  const lower = direction(contour, contour.length - stretch, contour.length)
   return Math.abs(atan2(upper[0] * lower[1] - upper[1] * lower[0], upper[0] * lower[0] + upper[1] * lower[1]))
 }
 
