@@ -177,12 +177,12 @@ describe('bad input of briefs', () => {
     [
       'an altitude too low',
       { conditions: [{ name: 'Deep', speed_m_s: 20, altitude_m: -1001 }] },
-      'bad.brief.json: altitude',
+      '"conditions.0.altitude_m"',
     ],
     [
       'an altitude too high',
       { conditions: [{ name: 'High', speed_m_s: 20, altitude_m: 20001 }] },
-      'bad.brief.json: altitude',
+      '"conditions.0.altitude_m"',
     ],
     ['no usable entry', { shortlist: [{ section: 'missing.txt' }] }, 'missing.txt'],
     ['an empty shortlist', { shortlist: [] }, 'shortlist'],
