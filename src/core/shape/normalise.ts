@@ -116,7 +116,9 @@ function sidesInOrder(first: Points, second: Points): Ordered {
 
 function checkCount(points: Points): void {
   if (points.length < FEWEST_POINTS) {
-    throw new BadInput(`${points.length} different points; a section needs at least ${FEWEST_POINTS}`)
+    throw new BadInput(
+      `${points.length} different ${points.length === 1 ? 'point' : 'points'}; a section needs at least ${FEWEST_POINTS}`,
+    )
   }
 }
 

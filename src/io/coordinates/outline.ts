@@ -64,15 +64,20 @@ function withoutCounts(rows: Rows, assumed: string[]): Row[][] {
     const all = [...first.slice(1), ...rest.flat()]
     return [all.slice(0, a), all.slice(a)]
   }
-  const isCount = (block: readonly Row[]): boolean =>
-    block[0]!.values.length === 1 &&
-    whole(block[0]!.values[0]) &&
-    block.length > 1 &&
-    block[1]!.values.length > 1
-  const blocks = rows.blocks.map((block) => [...block])
-  const counted = blocks.filter(isCount)
-  if (counted.length > 0) assumed.push('the number before a list was read as its count of points')
-  return blocks.map((block) => (isCount(block) ? block.slice(1) : block))
+  const isCount = (row: Row): boolean => row.values.length === 1 && whole(row.values[0])
+  if (!rows.blocks.some((block) => block.some(isCount))) return rows.blocks.map((block) => [...block])
+  assumed.push('the number before a list was read as its count of points')
+  return rows.blocks.flatMap((block) => splitAt(block, isCount)).filter((block) => block.length > 0)
+}
+
+/** The pieces of a block between the rows that part it. */
+function splitAt(block: readonly Row[], parts: (row: Row) => boolean): Row[][] {
+  const pieces: Row[][] = [[]]
+  for (const row of block) {
+    if (parts(row)) pieces.push([])
+    else pieces.at(-1)!.push(row)
+  }
+  return pieces
 }
 
 function threeColumns(rows: Rows, all: readonly Row[]): RawOutline | null {
