@@ -2,10 +2,18 @@
 export interface Axis {
   /** Plain words with the unit. */
   readonly label: string
+  /** What a read-out calls the value. */
+  readonly symbol: string
+  /** What a read-out puts behind the value, with its space; empty for a bare number. */
+  readonly unit: string
+  /** Decimals of a read-out. */
+  readonly decimals: number
   /** Larger values point down (pressure: suction up). */
   readonly reversed?: boolean
   readonly from?: number
   readonly to?: number
+  /** Nearly equal values are not spread over more than this. */
+  readonly leastSpan?: number
 }
 
 /** The state that a point of a curve stands for, so that other plots can mark the same. */
@@ -16,6 +24,10 @@ export interface PointState {
   readonly alpha: number | null
   /** Chord fraction; null where the plot knows only an angle. */
   readonly xOverC: number | null
+  /** Side of the section, where the place is on one. */
+  readonly side: 'upper' | 'lower' | null
+  /** Distance from the centreline of the wing, m; null where the plot shows a section. */
+  readonly spanY: number | null
 }
 
 /** A curve of one entry. */
@@ -52,3 +64,8 @@ export interface Plot {
 }
 
 export const DEGREES = 180 / Math.PI
+
+/** A state of an entry of which only the given parts are known. */
+export function stateOf(entry: number, known: Partial<Omit<PointState, 'entry'>>): PointState {
+  return { entry, alpha: null, xOverC: null, side: null, spanY: null, ...known }
+}
