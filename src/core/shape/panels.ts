@@ -82,9 +82,20 @@ function panelDensity(contour: Contour, count: number): { s: Float64Array; share
   return { s, share }
 }
 
-/** Radius of curvature at the nose, averaged over a short arc so that noise in measured points evens out. */
+/** Longest half arc over which the nose radius is averaged, chords, and its share of the radius. */
+const NOSE_ARC = 0.003
+const NOSE_ARC_IN_RADII = 0.2
+
+/**
+ * Radius of curvature at the nose, averaged over a short arc so that noise in measured points evens out; a
+ * sharp nose is looked at again over an arc that is short against its own radius.
+ */
 export function noseRadius(contour: Contour): number {
-  const reach = 0.003
+  const first = meanRadius(contour, NOSE_ARC)
+  return NOSE_ARC_IN_RADII * first < NOSE_ARC ? meanRadius(contour, NOSE_ARC_IN_RADII * first) : first
+}
+
+function meanRadius(contour: Contour, reach: number): number {
   const before = pointAt(contour, contour.nose - reach)
   const after = pointAt(contour, contour.nose + reach)
   const turned = atan2(
