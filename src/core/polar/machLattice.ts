@@ -1,4 +1,3 @@
-import { power } from '../numerics/elementary'
 import type { Method, Polar, PolarPoint } from './polar'
 
 /** The free-stream Mach numbers at which polars are computed; between them they are interpolated. */
@@ -8,7 +7,7 @@ export const MACH_LATTICE: readonly number[] = [0, 0.15, 0.3, 0.4, 0.5]
 export interface MachBracket {
   readonly low: number
   readonly high: number
-  /** 0 at `low`, 1 at `high`; linear in M squared, in which the compressibility rules are smooth at M = 0. */
+  /** 0 at `low`, 1 at `high`; linear in 1/sqrt(1 - M^2), in which lift and moment grow (Prandtl and Glauert). */
   readonly fraction: number
 }
 
@@ -24,7 +23,9 @@ export function machBracket(method: Method, mach: number): MachBracket {
   const low = MACH_LATTICE[k]
   const high = MACH_LATTICE[k + 1]
   if (mach === low) return { low, high: low, fraction: 0 }
-  return { low, high, fraction: (power(mach, 2) - power(low, 2)) / (power(high, 2) - power(low, 2)) }
+  const growth = (m: number): number => 1 / Math.sqrt(1 - m * m)
+  return { low, high, fraction: (growth(mach) - growth(low)) / (growth(high) - growth(low)) }
+}
 }
 
 /**

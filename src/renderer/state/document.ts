@@ -9,7 +9,9 @@ export function createDocument(initial: Brief) {
   const brief = history.value
   const set = (name: string, part: Partial<Brief>, field?: string): void =>
     history.change(name, { ...brief.value, ...part }, field)
-  const setEntries = (name: string, shortlist: readonly BriefEntry[]): void => set(name, { shortlist })
+  const setEntries = (name: string, shortlist: readonly BriefEntry[]): void => {
+    if (shortlist !== brief.value.shortlist) set(name, { shortlist })
+  }
 
   return {
     brief,
@@ -51,8 +53,10 @@ export function createDocument(initial: Brief) {
       set('add a condition', { conditions: [...brief.value.conditions, condition] }),
     removeCondition: (index: number): void =>
       set('remove a condition', { conditions: brief.value.conditions.toSpliced(index, 1) }),
-    moveCondition: (index: number, by: number): void =>
-      set('move a condition', { conditions: moved(brief.value.conditions, index, by) }),
+    moveCondition(index: number, by: number): void {
+      const conditions = moved(brief.value.conditions, index, by)
+      if (conditions !== brief.value.conditions) set('move a condition', { conditions })
+    },
     addLimit: (limit: BriefLimit): void => set('add a limit', { limits: [...brief.value.limits, limit] }),
     setLimit: (index: number, part: Partial<BriefLimit>, field: string): void =>
       set(
