@@ -26,7 +26,6 @@ export function machBracket(method: Method, mach: number): MachBracket {
   const growth = (m: number): number => 1 / Math.sqrt(1 - m * m)
   return { low, high, fraction: (growth(mach) - growth(low)) / (growth(high) - growth(low)) }
 }
-}
 
 /**
  * A polar between two of the lattice at the same angles: linear in the fraction, point by point. A point
