@@ -11,7 +11,7 @@ import { readBrief } from '../../../src/io/brief'
 import { jobFromBrief } from '../../../src/io/job'
 import { briefText } from '../../support/briefs'
 
-const jobOf = (change: object = {}, method: 'thin' | 'panel' = 'panel') =>
+const jobOf = (change: Record<string, unknown> = {}, method: 'thin' | 'panel' = 'panel') =>
   jobFromBrief(readBrief(briefText(change), 'test'), 'test', () => new Uint8Array(), { method }).job
 
 function completed(job: ReturnType<typeof jobOf>): Map<string, TaskResult> {
