@@ -36,12 +36,12 @@ const ONSET_WIDTH = 0.06
  */
 export function amplificationRate(H: number, R: number, out: Float64Array): void {
   envelopeOnset(H, out)
-  const p = (log(R) / Math.LN10 - out[0]!) / (2 * ONSET_WIDTH) + 0.5
+  const p = (log(R) / Math.LN10 - out[0]) / (2 * ONSET_WIDTH) + 0.5
   if (p <= 0) {
     out[0] = out[1] = out[2] = 0
     return
   }
-  const onsetSlope = out[1]!
+  const onsetSlope = out[1]
   const ramp = p < 1 ? p * p * (3 - 2 * p) : 1
   const rampSlope = p < 1 ? (6 * p * (1 - p)) / (2 * ONSET_WIDTH) : 0
   // (m + 1)/2 l = (0.058 (H-4)^2/(H-1) - 0.068 + l)/2
@@ -52,8 +52,8 @@ export function amplificationRate(H: number, R: number, out: Float64Array): void
   const lSlope = 6.54 / (H * H) - (2 * l) / H
   const g = (m + l) / 2
   envelopeGrowth(H, out)
-  const rate = out[0]!
-  const rateSlope = out[1]!
+  const rate = out[0]
+  const rateSlope = out[1]
   const value = rate * g
   out[0] = value * ramp
   out[1] = (rateSlope * g + (rate * (mSlope + lSlope)) / 2) * ramp - value * rampSlope * onsetSlope
