@@ -1,5 +1,6 @@
-import { mkdir, rmdir } from 'node:fs/promises'
+import { rmdir } from 'node:fs/promises'
 import { join, resolve } from 'node:path'
+import { makeFolder } from '../files/makeFolder'
 import { plainReason } from '../files/plainReason'
 import { compareFiles } from '../io/csv'
 import { readArguments } from './arguments'
@@ -32,7 +33,7 @@ export const compare: Command = {
     if (out === undefined || out === '' || out === '-') throw new Failure('--out DIR is needed: a folder')
     const { comparison, status } = await runBrief(positionals, values, null, terminal)
     const folder = resolve(terminal.folder, out)
-    const made = await makeFolder(folder, out)
+    const made = await makeOut(folder, out)
     try {
       const files = compareFiles(comparison)
       await writeOutputs(
@@ -48,9 +49,9 @@ export const compare: Command = {
 }
 
 /** Makes the folder; whether it was not there before. */
-async function makeFolder(folder: string, named: string): Promise<boolean> {
+async function makeOut(folder: string, named: string): Promise<boolean> {
   try {
-    return (await mkdir(folder, { recursive: true })) !== undefined
+    return await makeFolder(folder)
   } catch (error) {
     const reason = (error as NodeJS.ErrnoException).code === 'EEXIST' ? 'it is a file' : plainReason(error)
     throw new Failure(`the folder ${named} cannot be made: ${reason}`)

@@ -1,9 +1,10 @@
 import { createHash, randomBytes } from 'node:crypto'
-import { mkdir, readdir, readFile, rename, rm, stat, utimes, writeFile } from 'node:fs/promises'
+import { readdir, readFile, rename, rm, stat, utimes, writeFile } from 'node:fs/promises'
 import { homedir } from 'node:os'
 import { join } from 'node:path'
 import { deserialize, serialize } from 'node:v8'
 import type { TaskResult } from '../core'
+import { makeFolder } from '../files/makeFolder'
 import type { Store } from '../run/store'
 
 /** A store in a folder, with `tidy` to be called when the work is done. */
@@ -51,7 +52,7 @@ export function diskCache(folder: string, coreHash: string, mostBytes: number): 
       written = true
       const part = join(folder, `${randomBytes(8).toString('hex')}.part`)
       try {
-        await mkdir(folder, { recursive: true })
+        await makeFolder(folder)
         await writeFile(part, pack(result))
         await rename(part, pathOf(key))
       } catch {
