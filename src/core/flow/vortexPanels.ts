@@ -49,25 +49,11 @@ export function solvePanels(panels: Panels): PanelFlow {
   const n = panels.x.length - 1
   const size = n + 1
   const edge = trailingEdgeOf(panels)
-  const matrix = new Float64Array(size * size)
-  fillVortexInfluence(panels, matrix, size)
-  const along = new Float64Array(size)
-  const across = new Float64Array(size)
-  for (let i = 0; i <= n; i++) {
-    const row = i * size
-    const gap = edge.sharp ? 0 : gapInfluence(panels, edge, panels.x[i], panels.y[i])
-    matrix[row] += gap - matrix[row + n]
-    matrix[row + n] = -1
-    along[i] = -panels.y[i]
-    across[i] = panels.x[i]
-  }
-  if (edge.sharp) {
-    matrix.fill(0, n * size)
-    edgeRow(panels, matrix.subarray(n * size))
-    along[n] = across[n] = 0
-  }
+  const along = Float64Array.from(panels.y, (y) => -y)
+  const across = Float64Array.from(panels.x)
+  if (edge.sharp) along[n] = across[n] = 0
   const weights = loadWeights(panels, edge)
-  const factors = factorInPlace(matrix, size)
+  const factors = factorInPlace(panelMatrix(panels, edge), size)
   if (factors.singular) {
     return { panels, edge, weights, along: along.fill(0), across: across.fill(0), solved: false }
   }
@@ -76,6 +62,28 @@ export function solvePanels(panels: Panels): PanelFlow {
     rhs[n] = -rhs[0]
   }
   return { panels, edge, weights, along, across, solved: true }
+}
+
+/**
+ * Matrix of the panel equations, row by row, one row a node. The unknowns are the vorticity at all nodes but
+ * the last, whose vorticity is minus the first, and in its place the stream function of the outline.
+ */
+export function panelMatrix(panels: Panels, edge: TrailingEdge): Float64Array {
+  const n = panels.x.length - 1
+  const size = n + 1
+  const matrix = new Float64Array(size * size)
+  fillVortexInfluence(panels, matrix, size)
+  for (let i = 0; i <= n; i++) {
+    const row = i * size
+    const gap = edge.sharp ? 0 : gapInfluence(panels, edge, panels.x[i], panels.y[i])
+    matrix[row] += gap - matrix[row + n]
+    matrix[row + n] = -1
+  }
+  if (edge.sharp) {
+    matrix.fill(0, n * size)
+    edgeRow(panels, matrix.subarray(n * size))
+  }
+  return matrix
 }
 
 /**
