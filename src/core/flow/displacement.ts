@@ -133,8 +133,7 @@ export const WAKE_STATIONS = 24
 export function traceWake(flow: PanelFlow, alpha: number): Wake {
   const { x: px, y: py } = flow.panels
   const n = px.length - 1
-  const first =
-    0.5 * (hypot(px[1] - px[0], py[1] - py[0]) + hypot(px[n] - px[n - 1], py[n] - py[n - 1]))
+  const first = 0.5 * (hypot(px[1] - px[0], py[1] - py[0]) + hypot(px[n] - px[n - 1], py[n] - py[n - 1]))
   const ratio = stretch(first, WAKE_LENGTH, WAKE_STATIONS)
   const x = new Float64Array(WAKE_STATIONS + 1)
   const y = new Float64Array(WAKE_STATIONS + 1)

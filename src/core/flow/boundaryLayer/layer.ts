@@ -51,4 +51,3 @@ export function emptyLayer(count: number): Layer {
     transition: { at: count, share: 1, forced: false },
   }
 }
-

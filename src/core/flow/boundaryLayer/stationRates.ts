@@ -219,7 +219,7 @@ function fillTurbulent(
   out[FRICTION] = P
   const PH = 0.5 * b[1] * rate
   const PR = 0.5 * b[2] * rate
-  set(out, FRICTION, 0, PH * kt + PR * Rt - P / thickness, PH * kd, PR * Ru + 0.5 * b[0] / t)
+  set(out, FRICTION, 0, PH * kt + PR * Rt - P / thickness, PH * kd, PR * Ru + (0.5 * b[0]) / t)
   const D = 0.5 * b[0] * free + q * q * (1 - free)
   const DH = 0.5 * b[1] * free + (0.5 * b[0] - q * q) * UH
   const DR = 0.5 * b[2] * free + (0.5 * b[0] - q * q) * UR
@@ -250,4 +250,3 @@ function fillTurbulent(
     out[EQUILIBRIUM + 4] / delta,
   )
 }
-

@@ -185,4 +185,3 @@ function transitionStep(
     step.share[r] = layer.transition.forced ? 0 : byShare
   }
 }
-
