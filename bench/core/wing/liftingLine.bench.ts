@@ -15,7 +15,7 @@ export function liftingLine(): Measured {
   }
   const section = { slope: 6.8, zeroLift: -0.07, momentAtZeroLift: -0.1 }
   const condition = { speed: 25, altitude: 600, isaOffset: 0, loadFactor: 1, mass: 24 }
-  const aircraft = { tailArm: 1.4, centreOfGravity: 0.27 }
+  const aircraft = { tailArm: 1.4, centreOfGravity: 0.27, tailless: false }
   const input = { shape, aircraft, condition, root: section, tip: section, fixedReynolds: null }
   return { run: () => void wingAt(input) }
 }

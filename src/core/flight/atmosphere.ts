@@ -32,10 +32,14 @@ export const HIGHEST_ALTITUDE = 20000
 /** kg/(m s K^0.5) and K, the constants of Sutherland's law in the standard atmosphere. */
 const SUTHERLAND_FACTOR = 1.458e-6
 const SUTHERLAND_TEMPERATURE = 110.4
+/** K: beyond these an offset is a slip of the pen, and Sutherland's law would be stretched. */
+const COLDEST = 100
+const HOTTEST = 500
 
 /**
  * The standard atmosphere at a geopotential pressure altitude (m, -1000 to 20000), its temperature shifted
- * by an offset (K) while the pressure keeps its standard value. Throws BadInput outside the range.
+ * by an offset (K) while the pressure keeps its standard value. Throws BadInput outside the range and for
+ * an offset that leaves no ordinary air.
  * Source: Manual of the ICAO Standard Atmosphere, Doc 7488/3 (1993); viscosity by Sutherland's law (same).
  */
 export function atmosphere(altitude: number, offset: number): Air {
@@ -48,7 +52,11 @@ export function atmosphere(altitude: number, offset: number): Air {
   const above = Math.max(altitude - TROPOPAUSE, 0)
   const pressure = lower * exp((-G0 * above) / (GAS_CONSTANT * TROPOPAUSE_TEMPERATURE))
   const temperature = standard + offset
-  if (!(temperature > 100)) throw new BadInput(`ISA offset ${offset} K leaves no air of ordinary temperature`)
+  if (!(temperature >= COLDEST && temperature <= HOTTEST)) {
+    throw new BadInput(
+      `ISA offset ${offset} K: give one that leaves air of ${COLDEST} to ${HOTTEST} K; here the standard is ${standard} K`,
+    )
+  }
   return {
     temperature,
     pressure,

@@ -50,15 +50,21 @@ export function flightState(area: number, flight: FlightInput): FlightState {
   }
 }
 
-/** Reynolds number of a chord (m) at a speed (m/s). */
+/** Reynolds number of a chord (m) at a true airspeed (m/s). */
 export function reynoldsNumber(air: Air, speed: number, chord: number): number {
   return (air.density * speed * chord) / air.viscosity
 }
 
 /** Why a condition cannot be flown, in a plain sentence; null when it can. */
 export function whyUnflyable(flight: FlightInput): string | null {
-  if (!(flight.speed > 0)) return 'the speed must be more than 0 m/s'
-  if (!(flight.mass > 0)) return 'the mass must be more than 0 kg'
-  if (!(flight.loadFactor > 0)) return 'the load factor must be more than 0: the wing has no lift to carry'
+  if (!isPositive(flight.speed)) return `the speed must be more than 0 m/s, not ${flight.speed}`
+  if (!isPositive(flight.mass)) return `the mass must be more than 0 kg, not ${flight.mass}`
+  if (!isPositive(flight.loadFactor)) {
+    return `the load factor must be more than 0, not ${flight.loadFactor}: the wing has no lift to carry`
+  }
   return null
+}
+
+function isPositive(value: number): boolean {
+  return value > 0 && Number.isFinite(value)
 }

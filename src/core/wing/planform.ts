@@ -38,15 +38,21 @@ const AGREEMENT = 1e-3
  * with the tip set lower, linear in y). Throws BadInput for values that give no wing.
  */
 export function taperedStations(area: number, span: number, taper: number, washout: number): WingStation[] {
-  if (!(area > 0)) throw new BadInput(`wing area ${area} m2: give more than 0`)
-  if (!(span > 0)) throw new BadInput(`span ${span} m: give more than 0`)
-  if (!(taper > 0))
+  if (!isLength(area)) throw new BadInput(`wing area ${area} m2: give more than 0`)
+  if (!isLength(span)) throw new BadInput(`span ${span} m: give more than 0`)
+  if (!isLength(taper)) {
     throw new BadInput(`taper ratio ${taper}: give more than 0; a tip chord of zero has no section`)
+  }
+  if (!Number.isFinite(washout)) throw new BadInput(`washout ${washout}: give an angle`)
   const root = (2 * area) / (span * (1 + taper))
   return [
     { y: 0, chord: root, twist: 0 },
     { y: span / 2, chord: taper * root, twist: -washout },
   ]
+}
+
+function isLength(value: number): boolean {
+  return value > 0 && Number.isFinite(value)
 }
 
 /**
@@ -57,15 +63,18 @@ export function checkStations(stations: readonly WingStation[], area: number, sp
   if (stations.length < 2) throw new BadInput('wing stations: give at least two, the root and the tip')
   if (stations[0].y !== 0) throw new BadInput(`wing station 1: y ${stations[0].y} m; the first lies at 0`)
   stations.forEach((station, i) => {
-    if (!(station.chord > 0))
+    if (!isLength(station.chord)) {
       throw new BadInput(`wing station ${i + 1}: chord ${station.chord} m; give more than 0`)
+    }
+    if (!Number.isFinite(station.twist))
+      throw new BadInput(`wing station ${i + 1}: give the twist as an angle`)
     if (i > 0 && !(station.y > stations[i - 1].y)) {
       throw new BadInput(`wing station ${i + 1}: y ${station.y} m does not lie outside the one before it`)
     }
   })
   const theirSpan = 2 * stations[stations.length - 1].y
   const theirArea = 2 * overSemispan(stations, (chord) => chord)
-  const differs = (a: number, b: number): boolean => Math.abs(a - b) > AGREEMENT * Math.abs(b)
+  const differs = (a: number, b: number): boolean => !(Math.abs(a - b) <= AGREEMENT * Math.abs(b))
   if (differs(theirSpan, span)) {
     throw new BadInput(`wing stations give a span of ${theirSpan.toPrecision(5)} m, the wing ${span} m`)
   }
