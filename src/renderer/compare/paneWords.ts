@@ -10,8 +10,11 @@ export function paneWords(comparison: Comparison | null, condition: number, draw
   if (comparison.conditions.length === 0) return 'Add a flight condition on the left.'
   if (drawn > 0) return null
   const notes = comparison.entries.map((entry) => missingNote(comparison, condition, entry))
-  const note = notes.find((words) => words !== null) ?? null
-  return note === null ? COMPUTING : `Nothing to show at this condition: ${note}.`
+  const [first] = notes
+  // An entry without a note is still to come.
+  if (first === undefined || notes.includes(null)) return COMPUTING
+  const reasons = notes.every((note) => note === first) ? first : leftOut(comparison, condition).join('; ')
+  return `Nothing to show at this condition: ${reasons}.`
 }
 
 /** What the pressure pane says when it has nothing to draw; null when it has. */
