@@ -93,6 +93,12 @@ describe('the same section read from a file, its mean line found from the outlin
     ['23012', 120, 6, 0.1],
     ['23112', 120, 5, 0.1],
     ['1408', 60, 5, 0.1],
+    // Mean lines that bend sharply behind the nose.
+    ['21012', 120, 6, 0.1],
+    ['21012', 60, 5, 0.1],
+    ['4112', 120, 6, 0.1],
+    ['22012', 100, 6, 0.1],
+    ['6209', 120, 6, 0.1],
     ['4415', 100, 6, 0.2],
     ['4418', 160, 6, 0.2],
     ['23018', 160, 6, 0.2],
@@ -115,4 +121,12 @@ describe('the same section read from a file, its mean line found from the outlin
       expect(Math.abs(ours.momentQuarterChord - truth.momentQuarterChord)).toBeLessThan(0.003)
     },
   )
+
+  it('NACA 21018, the sharpest bend under a thick nose: zero-lift angle within 0.2 deg', () => {
+    // No target is set for the moment of sections above 12 %; here it was measured 0.008 off.
+    const exact = nacaSection('21018')
+    const lines = Array.from(exact.x, (x, i) => `${x.toFixed(6)} ${exact.y[i].toFixed(6)}`)
+    const ours = thinAirfoil(readSection(lines.join('\n'), '21018.txt').section)
+    expect(Math.abs(ours.zeroLiftAngle - thinAirfoil(exact).zeroLiftAngle) * RADIAN).toBeLessThan(0.2)
+  })
 })

@@ -1,4 +1,4 @@
-import { cos, hypot } from '../numerics/elementary'
+import { cos, hypot, power } from '../numerics/elementary'
 import { leastSquaresPolynomial } from '../numerics/leastSquares'
 import { contourOf, pointAt, type Contour } from './contour'
 import { noseRadius } from './panels'
@@ -6,16 +6,21 @@ import type { Section } from './section'
 
 /** Points of each side on which the perpendiculars are cut. */
 const SIDE_POINTS = 400
-/** Rounds of moving the mean line to the middle of its perpendiculars, and the share of each move taken. */
-const ROUNDS = 30
-const RELAXATION = 0.6
+/** Rounds of moving the mean line to the middle of its perpendiculars, and the largest share of a move taken. */
+const ROUNDS = 150
+const LARGEST_SHARE = 0.6
 const SETTLED = 1e-7
 /**
  * Inside the nose circle a perpendicular says nothing of the mean line (every diameter is one). Ahead of
- * this many nose radii the line continues the cubic fitted to it over the next stretch, in chords.
+ * this many nose radii the line continues the parabola fitted to it over the next stretch, in chords, and
+ * over at least so many points. A longer reach or stretch misses mean lines that bend sharply just behind the
+ * nose; a shorter one, or a cubic, magnifies the noise of thick sections.
  */
-const NOSE_REACH = 1.5
-const FITTED_STRETCH = 0.12
+const NOSE_REACH = 0.8
+const FITTED_STRETCH = 0.06
+const FEWEST_FITTED = 4
+/** The nose never counts for more than this share of the chord, however blunt or dented it is. */
+const LONGEST_NOSE = 0.25
 
 /**
  * The mean line of an outline, from the leading edge (the point farthest from the trailing edge) to the
@@ -40,18 +45,36 @@ export function meanLineOf(section: Section, count: number): { x: Float64Array; 
     x[k] = nose.x + share * (edgeX - nose.x)
     y[k] = nose.y + share * (edgeY - nose.y)
   }
+  const radius = noseRadius(contour)
+  const half = new Float64Array(count + 1)
   for (let round = 0; round < ROUNDS; round++) {
-    const move = centreInPlace(x, y, upper, lower)
-    continueToNoseInPlace(x, y, nose.x + NOSE_REACH * noseRadius(contour))
+    const move = centreInPlace(x, y, half, upper, lower)
+    continueToNoseInPlace(x, y, nose.x + Math.min(NOSE_REACH * radius, LONGEST_NOSE))
     if (move < SETTLED) break
   }
   return { x, y }
 }
 
+/**
+ * Share of each move that is taken. Tilting a perpendicular by a small angle moves its middle by g = h dh/dx
+ * times that angle, h being half the thickness; so a round multiplies a ripple of wave number k by
+ * 1 - share (1 + i k g). 1 / (1 + (k g)^2) damps it most, and the shortest ripple has k = 1 / step.
+ */
+function sharesOfMoves(x: Float64Array, half: Float64Array): Float64Array {
+  const last = x.length - 1
+  return x.map((_, k) => {
+    const [before, after] = [Math.max(k - 1, 0), Math.min(k + 1, last)]
+    const step = 0.5 * (x[after] - x[before])
+    const g = (0.25 * (power(half[after], 2) - power(half[before], 2))) / step
+    return Math.min(LARGEST_SHARE, 1 / (1 + power(g / step, 2)))
+  })
+}
+
 function continueToNoseInPlace(x: Float64Array, y: Float64Array, ahead: number): void {
   const from = x.findIndex((value) => value >= ahead)
-  const to = x.findIndex((value) => value > ahead + FITTED_STRETCH)
-  const fit = leastSquaresPolynomial(x.subarray(from, to), y.subarray(from, to), 3)
+  const behind = x.findIndex((value) => value > ahead + FITTED_STRETCH)
+  const to = Math.max(behind, from + FEWEST_FITTED)
+  const fit = leastSquaresPolynomial(x.subarray(from, to), y.subarray(from, to), 2)
   for (let k = 0; k < from; k++) y[k] = fit(x[k])
 }
 
@@ -72,9 +95,16 @@ function sidePoints(contour: Contour, from: number, to: number): Side {
   return { x, y }
 }
 
-/** One round: moves the inner points of the mean line and returns the largest move. */
-function centreInPlace(x: Float64Array, y: Float64Array, upper: Side, lower: Side): number {
+/** One round: moves the inner points of the mean line, notes half the thickness, returns the largest move. */
+function centreInPlace(
+  x: Float64Array,
+  y: Float64Array,
+  half: Float64Array,
+  upper: Side,
+  lower: Side,
+): number {
   const before = y.slice()
+  const shares = sharesOfMoves(x, half)
   let largest = 0
   for (let k = 1; k + 1 < x.length; k++) {
     const slope = slopeAt(x, before, k)
@@ -82,7 +112,8 @@ function centreInPlace(x: Float64Array, y: Float64Array, upper: Side, lower: Sid
     const above = distanceTo(upper, x[k], before[k], 1 / size, slope / size)
     const below = distanceTo(lower, x[k], before[k], 1 / size, slope / size)
     if (above === null || below === null) continue
-    const move = (RELAXATION * 0.5 * (above + below)) / size
+    half[k] = 0.5 * (above - below)
+    const move = (shares[k] * 0.5 * (above + below)) / size
     y[k] = before[k] + move
     largest = Math.max(largest, Math.abs(move))
   }
