@@ -78,5 +78,5 @@ export function writeBrief(brief: Brief): string {
     2,
   )
   // Pairs of numbers (embedded outlines) go on one line each.
-  return `${text.replace(/\[\s+(-?[\d.e-]+),\s+(-?[\d.e-]+)\s+\]/g, '[$1, $2]')}\n`
+  return `${text.replace(/\[\n\s+(-?[\d.e-]+),\n\s+(-?[\d.e-]+)\n\s+\]/g, '[$1, $2]')}\n`
 }

@@ -39,7 +39,7 @@ export function jobFromBrief(
 ): ReadyJob {
   const faults: string[] = []
   const warnings: string[] = []
-  const names = new Map<string, number>()
+  const names = new Set<string>()
   const entries = brief.shortlist.map((entry) => {
     const ready = jobEntry(entry, names, readBytes, warnings)
     if (ready.fault !== null) faults.push(ready.fault)
@@ -121,16 +121,11 @@ function jobCondition(condition: BriefCondition, brief: Brief): Condition {
   }
 }
 
-function jobEntry(
-  entry: BriefEntry,
-  names: Map<string, number>,
-  readBytes: ReadBytes,
-  warnings: string[],
-): JobEntry {
+function jobEntry(entry: BriefEntry, names: Set<string>, readBytes: ReadBytes, warnings: string[]): JobEntry {
   const plain = entryName(entry)
-  const times = (names.get(plain) ?? 0) + 1
-  names.set(plain, times)
-  const name = times === 1 ? plain : `${plain} (${times})`
+  let name = plain
+  for (let times = 2; names.has(name); times++) name = `${plain} (${times})`
+  names.add(name)
   const pair = entry.section === null
   const common = {
     name,

@@ -46,6 +46,10 @@ describe('a brief', () => {
     expect(text).not.toContain('null')
   })
 
+  it('keeps a name that looks like a pair of numbers to the letter', () => {
+    expect(readBrief(writeBrief(read({ name: 'Mix [ 1, 2 ]' })), 'again.json').name).toBe('Mix [ 1, 2 ]')
+  })
+
   it.each([
     ['an unknown field', { colour: 'red' }, '"colour"'],
     ['an unknown field within', { wing: { area_m2: 1, span_m: 3, chord_m: 1 } }, '"wing.chord_m"'],
@@ -92,6 +96,17 @@ describe('the job of a brief', () => {
   it('gives a repeated name a number', () => {
     const { job: made } = job({ shortlist: [{ section: 'naca:2412' }, { section: 'naca:2412' }] })
     expect(made.entries.map((entry) => entry.name)).toEqual(['naca:2412', 'naca:2412 (2)'])
+  })
+
+  it('gives no two entries one name, even when one is called like a numbered repeat', () => {
+    const shortlist = [
+      { section: 'naca:2412' },
+      { section: 'naca:2412' },
+      { section: 'naca:2415', name: 'naca:2412 (2)' },
+    ]
+    const names = job({ shortlist }).job.entries.map((entry) => entry.name)
+    expect(new Set(names).size).toBe(3)
+    expect(names.slice(0, 2)).toEqual(['naca:2412', 'naca:2412 (2)'])
   })
 
   it('names the fault of one entry and of one limit, and keeps the rest', () => {

@@ -18,7 +18,7 @@ const HIGHEST_LIFT = 0.9
 /**
  * The straight line of a polar: zero-lift angle and moment where the lift crosses zero (interpolated
  * linearly between points), slope by least squares through that crossing over c_l from -0.2 to 0.9.
- * Null when the polar does not cross zero lift with converged points.
+ * Null when the polar does not cross zero lift with converged points, or has no other point in that range.
  */
 export function liftLine(polar: Polar): SectionLine | null {
   const points = polar.points.filter(
@@ -39,6 +39,7 @@ export function liftLine(polar: Polar): SectionLine | null {
       moments += (alpha - zeroLift) * liftCoefficient!
       weights += power(alpha - zeroLift, 2)
     }
+    if (weights === 0) return null
     return {
       slope: moments / weights,
       zeroLift,

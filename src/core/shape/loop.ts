@@ -22,21 +22,22 @@ export function closedLoop(raw: Points): { points: Points; dropped: number } {
 
 /**
  * Where the trailing edge of a loop lies: its sharpest corner, or the pair of neighbouring corners between
- * which the base of a blunt edge runs. `start` is the first point of the outline and `end` the last;
- * equal for a closed edge.
+ * which the base of a blunt edge runs. A thin nose drawn by few points is a sharp corner too, but turns less
+ * with its neighbour than the two corners of a base do. `start` is the first point of the outline and `end`
+ * the last; equal for a closed edge.
  */
 export function findTrailingEdge(points: Points): { start: number; end: number; restarted: boolean } {
   const n = points.length
   const turns = points.map((_, i) => Math.abs(turnAt(points, i)))
   let sharpest = 0
   for (let i = 1; i < n; i++) if (turns[i] > turns[sharpest]) sharpest = i
-  if (turns[sharpest] >= SHARP_TURN) {
-    return { start: sharpest, end: sharpest, restarted: sharpest !== 0 }
-  }
   const both = (i: number): number => turns[i] + turns[(i + 1) % n]
   let base = n - 1 // the base of an open file runs from its last point to its first
   for (let i = 0; i < n; i++) if (both(i) > both(base) * (1 + SAME)) base = i
   const start = (base + 1) % n
+  if (turns[sharpest] >= SHARP_TURN && (sharpest === base || sharpest === start)) {
+    return { start: sharpest, end: sharpest, restarted: sharpest !== 0 }
+  }
   return { start, end: base, restarted: start !== 0 }
 }
 

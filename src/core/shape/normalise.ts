@@ -97,8 +97,7 @@ function sidesInOrder(first: Points, second: Points): Ordered {
   const fromNose = (side: Points): Points =>
     side.length > 1 && side[0][0] > side[side.length - 1][0] ? [...side].reverse() : side
   const [a, b] = [fromNose(first), fromNose(second)]
-  const height = (side: Points): number => side.reduce((sum, [, y]) => sum + y, 0) / side.length
-  const exchanged = height(a) < height(b)
+  const exchanged = signedArea([...[...a].reverse(), ...b]) < 0
   const [upper, lower] = exchanged ? [b, a] : [a, b]
   const joined = [...[...upper].reverse(), ...lower]
   const points = joined.filter(

@@ -32,23 +32,21 @@ export function findOutline(rows: Rows, file: string): FoundOutline {
   if (short !== undefined) {
     throw new FileProblem(file, short.line, 'one number alone is no point', 'give x and y on each line')
   }
-  const three = threeColumns(rows, all)
+  const three = threeColumns(rows, all, file)
   if (three !== null) {
     assumed.push('read as a table of x, upper y and lower y')
     return { raw: three, assumed, warnings }
   }
   const [ix, iy] = columns(rows, all, assumed, warnings)
-  const missing = all.find((row) => row.values.length <= Math.max(ix, iy))
-  if (missing !== undefined) {
-    throw new FileProblem(
-      file,
-      missing.line,
-      'a column is missing',
-      'give as many numbers as the other lines',
-    )
-  }
+  refuseMissing(all, Math.max(ix, iy), file)
   const lists = blocks.map((block) => block.map((row): Point => [row.values[ix]!, row.values[iy]!]))
   return { raw: loopOrSides(lists, assumed, warnings), assumed, warnings }
+}
+
+function refuseMissing(all: readonly Row[], lastColumn: number, file: string): void {
+  const missing = all.find((row) => row.values.length <= lastColumn)
+  if (missing === undefined) return
+  throw new FileProblem(file, missing.line, 'a column is missing', 'give as many numbers as the other lines')
 }
 
 /** Takes out the lines that only count the points of the lists. */
@@ -80,11 +78,12 @@ function splitAt(block: readonly Row[], parts: (row: Row) => boolean): Row[][] {
   return pieces
 }
 
-function threeColumns(rows: Rows, all: readonly Row[]): RawOutline | null {
+function threeColumns(rows: Rows, all: readonly Row[], file: string): RawOutline | null {
   const upperAt = rows.header?.findIndex((word) => /^y.*(up|top)/.test(word)) ?? -1
   const lowerAt = rows.header?.findIndex((word) => /^y.*(low|bot)/.test(word)) ?? -1
   const xAt = rows.header?.findIndex((word) => /^x/.test(word)) ?? -1
   if (upperAt < 0 || lowerAt < 0 || xAt < 0) return null
+  refuseMissing(all, Math.max(upperAt, lowerAt, xAt), file)
   const side = (at: number): Point[] => all.map((row): Point => [row.values[xAt]!, row.values[at]!])
   return { kind: 'sides', upper: side(upperAt), lower: side(lowerAt) }
 }
@@ -98,7 +97,7 @@ function columns(rows: Rows, all: readonly Row[], assumed: string[], warnings: s
       return [x, y]
     }
   }
-  const width = Math.min(...all.map((row) => row.values.length))
+  const width = all.reduce((least, row) => Math.min(least, row.values.length), Infinity)
   if (width < 3) return [0, 1]
   const start = all[0]!.values[0]!
   if (all.every((row, i) => row.values[0] === start + i)) {
@@ -133,7 +132,7 @@ function isMonotonic(list: readonly Point[]): boolean {
 
 function secondList(points: readonly Point[]): number | null {
   const xs = points.map(([x]) => x)
-  const range = Math.max(...xs) - Math.min(...xs)
+  const range = xs.reduce((a, b) => Math.max(a, b), -Infinity) - xs.reduce((a, b) => Math.min(a, b), Infinity)
   const at = points.findIndex(([x], i) => i > 2 && Math.abs(x - points[i - 1]![0]) > LIST_STEP * range)
   if (at < 4 || points.length - at < 4) return null
   return isMonotonic(points.slice(0, at)) && isMonotonic(points.slice(at)) ? at : null

@@ -19,7 +19,8 @@ const COMMENT = /^\s*(#|!|%|\/\/)/
 /** Old programs end a text with this character. */
 const END_OF_TEXT = String.fromCharCode(26)
 const NUMBER = /^[-+]?(\d+\.?\d*|\.\d+)([ed][-+]?\d+)?$/i
-const COMMA_NUMBERS = /^\s*[-+]?\d*,\d+(e[-+]?\d+)?[\s;]+[-+]?\d*,\d+(e[-+]?\d+)?[\s;]*$/i
+/** A line of numbers parted by spaces or semicolons, at least two of which have a decimal comma. */
+const COMMA_NUMBERS = /^\s*(\d+[\s;]+)?[-+]?\d*,\d+(e[-+]?\d+)?([\s;]+[-+]?\d*,?\d+(e[-+]?\d+)?)+[\s;]*$/i
 
 /** Reads the rows of a text. Throws a FileProblem that names the line of anything that is neither. */
 export function readRows(text: string, file: string): Rows {
@@ -40,6 +41,10 @@ export function readRows(text: string, file: string): Rows {
     const cells = cellsOf(line, decimalComma)
     const values = cells.map((cell) => valueOf(cell, decimalComma))
     if (values.every((value) => value !== null)) {
+      const large = values.findIndex((value) => !Number.isFinite(value))
+      if (large >= 0) {
+        throw new FileProblem(file, i + 1, `"${cells[large]}" is too large a number`, 'correct the number')
+      }
       block.push({ line: i + 1, values })
       return
     }

@@ -24,11 +24,15 @@ export function axisEnds(plot: Plot, which: 'x' | 'y'): AxisEnds {
   let high = axis.to ?? Math.max(...values)
   const missing = (axis.leastSpan ?? Math.max(1e-6 * Math.abs(high), 1e-12)) - (high - low)
   if (missing > 0) [low, high] = [low - missing / 2, high + missing / 2]
-  const step = niceStep(high - low)
-  return [
-    axis.from ?? step * Math.floor(low / step + WHOLE),
-    axis.to ?? step * Math.ceil(high / step - WHOLE),
-  ]
+  // Ends moved out to whole steps may span so much that ticks go in a larger step: the ends follow it.
+  let step = niceStep(high - low)
+  for (;;) {
+    const from = axis.from ?? step * Math.floor(low / step + WHOLE)
+    const to = axis.to ?? step * Math.ceil(high / step - WHOLE)
+    const next = niceStep(to - from)
+    if (next <= step) return [from, to]
+    step = next
+  }
 }
 
 /** Round values between the ends of an axis, with the decimals that tell them apart. */

@@ -31,6 +31,13 @@ describe('the ends of an axis', () => {
     )
   })
 
+  it('fall on ticks when moving them out to whole steps makes the step larger', () => {
+    // -0.5 to 6.4 goes in seven steps of 1, but -1 to 7 does not.
+    const [from, to] = axisEnds(plotOf([-0.5, 6.4]), 'y')
+    const { values } = axisTicks([from, to])
+    expect([values[0], values.at(-1)]).toEqual([from, to])
+  })
+
   it('are those that the plot gives', () => {
     expect(axisEnds(plotOf([0.2, 0.7], { from: 0, to: 1 }), 'y')).toEqual([0, 1])
   })
