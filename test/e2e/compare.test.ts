@@ -173,6 +173,30 @@ describe('the window', () => {
     expect(await page.locator('.shortlist tr.marked').count()).toBe(1)
   })
 
+  it('follows the theme of the system, and the one that is chosen', async () => {
+    const surface = () =>
+      page.locator('.window').evaluate((element) => getComputedStyle(element).backgroundColor)
+    const light = await surface()
+    await page.emulateMedia({ colorScheme: 'dark' })
+    await page.locator('.window[data-theme="dark"]').waitFor()
+    const dark = await surface()
+    expect(dark).not.toBe(light)
+    await page.getByLabel('Theme').selectOption('light')
+    expect(await surface()).toBe(light)
+    await page.emulateMedia({ colorScheme: 'light' })
+    await page.getByLabel('Theme').selectOption('dark')
+    expect(await surface()).toBe(dark)
+  })
+
+  it('keeps the caution in sight, its words one key away', async () => {
+    const caution = page.locator('.caution summary')
+    const box = (await caution.boundingBox())!
+    expect(box.y + box.height).toBeLessThanOrEqual(900)
+    await caution.focus()
+    await page.keyboard.press('Enter')
+    await page.getByText('the applicable airworthiness').waitFor()
+  })
+
   it('says why the slowest condition has no figures yet', async () => {
     await page.getByRole('radio', { name: /Slowest, sea level/ }).click()
     await page

@@ -70,34 +70,37 @@ describe('the file of the brief', () => {
   it('is asked for once, then saved without asking', async () => {
     const parts = desk()
     const brief = briefFile(parts)
-    parts.places.push('/work/mine.brief.json')
+    parts.places.push('/documents/mine.brief.json')
     expect(await brief.save('first', 'suggested.brief.json', false)).toEqual({ name: 'mine.brief.json' })
     expect(parts.asked).toHaveLength(1)
     expect((parts.asked[0] as SaveDialogOptions).defaultPath).toBe('suggested.brief.json')
     await brief.save('second', 'suggested.brief.json', false)
     expect(parts.asked).toHaveLength(1)
-    expect(parts.disk.get('/work/mine.brief.json')).toBe('second')
+    expect(parts.disk.get('/documents/mine.brief.json')).toBe('second')
   })
 
   it('is the one that was opened, until it is saved elsewhere or forgotten', async () => {
-    const parts = desk({ '/work/a.brief.json': 'a' })
+    const parts = desk({ '/documents/a.brief.json': 'a' })
     const brief = briefFile(parts)
-    parts.picks.push(['/work/a.brief.json'])
+    parts.picks.push(['/documents/a.brief.json'])
     expect((await brief.open())?.name).toBe('a.brief.json')
     await brief.save('a2', 's', false)
-    parts.places.push('/work/b.brief.json')
+    parts.places.push('/documents/b.brief.json')
     await brief.save('b', 's', true)
     await brief.save('b2', 's', false)
-    expect(Object.fromEntries(parts.disk)).toEqual({ '/work/a.brief.json': 'a2', '/work/b.brief.json': 'b2' })
+    expect(Object.fromEntries(parts.disk)).toEqual({
+      '/documents/a.brief.json': 'a2',
+      '/documents/b.brief.json': 'b2',
+    })
     brief.forget()
     expect(await brief.save('c', 's', false)).toBeNull()
     expect(parts.asked).toHaveLength(3)
   })
 
   it('stays as it was when the user gives up or the disk refuses', async () => {
-    const parts = desk({ '/work/a.brief.json': 'a' })
+    const parts = desk({ '/documents/a.brief.json': 'a' })
     const brief = briefFile(parts)
-    parts.picks.push(['/work/a.brief.json'])
+    parts.picks.push(['/documents/a.brief.json'])
     await brief.open()
     expect(await brief.save('b', 's', true)).toBeNull()
     expect(await brief.open()).toBeNull()
@@ -107,7 +110,7 @@ describe('the file of the brief', () => {
     await expect(brief.save('b', 's', true)).rejects.toThrow('the disk is full')
     Object.assign(parts, { write })
     await brief.save('a2', 's', false)
-    expect(Object.fromEntries(parts.disk)).toEqual({ '/work/a.brief.json': 'a2' })
+    expect(Object.fromEntries(parts.disk)).toEqual({ '/documents/a.brief.json': 'a2' })
   })
 })
 

@@ -10,6 +10,7 @@ import { nacaSection } from '../../../src/core/shape/naca'
 import { readBrief } from '../../../src/io/brief'
 import { jobFromBrief } from '../../../src/io/job'
 import { briefText } from '../../support/briefs'
+import { sectionState } from '../../support/states'
 
 const jobOf = (change: Record<string, unknown> = {}, method: 'thin' | 'panel' = 'panel') =>
   jobFromBrief(readBrief(briefText(change), 'test'), 'test', () => new Uint8Array(), { method }).job
@@ -117,22 +118,7 @@ describe('a job', () => {
 describe('polars between the Mach numbers of the lattice', () => {
   const section = nacaSection('4412')
   const alphas = [-4, 0, 4, 8].map((deg) => (deg * Math.PI) / 180)
-  const at = (mach: number) =>
-    sweep(
-      section,
-      {
-        method: 'panel',
-        reynolds: null,
-        mach,
-        surface: 'clean',
-        amplification: null,
-        tripUpper: 1,
-        tripLower: 1,
-        flap: 0,
-        panels: 180,
-      },
-      alphas,
-    )
+  const at = (mach: number) => sweep(section, sectionState({ mach }), alphas)
 
   it.each([0.08, 0.22, 0.35, 0.45])(
     'at Mach %d differ from the computed ones by less than 0.2 per cent in lift',
@@ -157,17 +143,7 @@ describe('polars between the Mach numbers of the lattice', () => {
 
 describe('the straight line of a polar', () => {
   it('is that of thin-airfoil theory to rounding', () => {
-    const state = {
-      method: 'thin',
-      reynolds: null,
-      mach: 0,
-      surface: 'clean',
-      amplification: null,
-      tripUpper: 1,
-      tripLower: 1,
-      flap: 0,
-      panels: 180,
-    } as const
+    const state = sectionState({ method: 'thin' })
     const alphas = Array.from({ length: 65 }, (_, i) => ((-12 + 0.5 * i) * Math.PI) / 180)
     const line = liftLine(sweep(nacaSection('2412'), state, alphas))!
     expect(line.slope).toBeCloseTo(2 * Math.PI, 10)
@@ -176,17 +152,7 @@ describe('the straight line of a polar', () => {
   })
 
   it('is none for a polar that does not cross zero lift', () => {
-    const state = {
-      method: 'thin',
-      reynolds: null,
-      mach: 0,
-      surface: 'clean',
-      amplification: null,
-      tripUpper: 1,
-      tripLower: 1,
-      flap: 0,
-      panels: 180,
-    } as const
+    const state = sectionState({ method: 'thin' })
     expect(liftLine(sweep(nacaSection('2412'), state, [0.1, 0.2]))).toBeNull()
   })
 })

@@ -3,21 +3,11 @@ import { BadInput } from '../../../src/core/numerics/errors'
 import type { SectionState } from '../../../src/core/polar/state'
 import { pressureAt, sweep } from '../../../src/core/polar/sweep'
 import { nacaSection } from '../../../src/core/shape/naca'
+import { sectionState } from '../../support/states'
 
 const section = nacaSection('2412')
 const DEG = Math.PI / 180
-const state = (change: Partial<SectionState> = {}): SectionState => ({
-  method: 'panel',
-  reynolds: null,
-  mach: 0,
-  surface: 'clean',
-  amplification: null,
-  tripUpper: 1,
-  tripLower: 1,
-  flap: 0,
-  panels: 100,
-  ...change,
-})
+const state = (change: Partial<SectionState> = {}): SectionState => sectionState({ panels: 100, ...change })
 
 describe('an angle sweep', () => {
   it('has one point for each angle, in the order asked, with what panels cannot give left empty', () => {

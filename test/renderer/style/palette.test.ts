@@ -86,7 +86,6 @@ describe('entryStyle', () => {
 describe.each([
   ['light', 0],
   ['dark', 1],
-  ['dark by the system', 2],
 ])('the %s theme', (_, block) => {
   const colours = coloursOf(block)
 
@@ -116,8 +115,4 @@ describe.each([
       }
     }
   })
-})
-
-it('the dark theme is the same by choice and by the system', () => {
-  expect(coloursOf(2)).toEqual(coloursOf(1))
 })
