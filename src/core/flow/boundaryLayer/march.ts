@@ -44,6 +44,7 @@ export function marchLayer(
     const old = layer.kind[i]
     setKind(layer, step, i, law)
     if (!warm || old !== layer.kind[i]) guessFromBefore(layer, i, stream, warm)
+    if (!warm && edge.answer[i] > 0) predict(layer, edge, i)
     if (!solveStation(layer, step, i, stream, edge) && failed < 0) failed = i
   }
   return failed
@@ -54,6 +55,15 @@ function refreshRates(layer: Layer, stream: Stream, first: number, end: number):
   for (let i = first; i < end; i++) {
     stationRates(rates[i], kind[i] as LayerKind, stream, q[i], t[i], m[i] / u[i], u[i])
   }
+}
+
+/** Without a former state the law is centred on a displacement thickness that stays as it is. */
+function predict({ m, u, kind, t }: Layer, edge: EdgeLaw, i: number): void {
+  const growth = Math.max(edge.speed[i] / u[i - 1], 1)
+  u[i] = edge.speed[i]
+  m[i] *= growth
+  if (growth > 1.2 && kind[i] === LAMINAR) t[i] = t[i - 1]
+  edge.defect[i] = m[i]
 }
 
 /** Kind of station i from the one before and from the transition law. */

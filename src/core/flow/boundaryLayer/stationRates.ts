@@ -138,13 +138,14 @@ function fill(
     a[2] = 0
     laminarFriction(k, b)
     laminarDissipation(k, c)
-    const P = (b[0] / R) * rate
+    // u/(t R): it does not depend on u, and holds at the stagnation point itself.
+    const inverse = 1 / (scale * t * t)
+    const P = b[0] * inverse
     out[FRICTION] = P
-    const bb = (b[1] / R) * rate
-    // rate/R is 1/(scale t^2): it falls with the square of t and does not depend on u.
+    const bb = b[1] * inverse
     set(out, FRICTION, 0, bb * kt - (2 * P) / thickness, bb * kd, 0)
-    const E = ((c[0] - b[0]) / R) * rate
-    const ee = ((c[1] - b[1]) / R) * rate
+    const E = (c[0] - b[0]) * inverse
+    const ee = (c[1] - b[1]) * inverse
     out[ENERGY] = E
     set(out, ENERGY, 0, ee * kt - (2 * E) / thickness, ee * kd, 0)
     amplificationRate(k, R, c)

@@ -1,9 +1,11 @@
 import { intervalBalance, SLOPES } from './intervalBalance'
+import { log } from '../../numerics/elementary'
 import type { Layer, TransitionLaw } from './layer'
 import {
   EQUILIBRIUM,
   GROWTH,
   LAMINAR,
+  LOG_SPEED,
   RATES_LENGTH,
   stationRates,
   TURBULENT,
@@ -119,7 +121,8 @@ export function stationStep(
     return
   }
   const { balance, slopes, before, here: after } = step
-  intervalBalance(balance, slopes, kind, layer.rates[i - 1], here, q1, t1, u1, q, t, u, dx)
+  if (i === 1 && kind === LAMINAR && u1 < NEAR_STAGNATION * u) startStep(step, layer, here, t1, u1, t, u, dx)
+  else intervalBalance(balance, slopes, kind, layer.rates[i - 1], here, q1, t1, u1, q, t, u, dx)
   for (let r = 0; r < 3; r++) {
     for (let j = 0; j < 4; j++) {
       before[4 * r + j] = slopes[SLOPES * r + j]
@@ -132,6 +135,37 @@ export function stationStep(
     for (let j = 0; j < 4; j++) before[8 + j] = after[8 + j] = 0
     after[8] = 0.1
     before[8] = -0.1
+  }
+}
+
+/** Share of the next station's speed below which the first station counts as the stagnation point itself. */
+const NEAR_STAGNATION = 0.1
+
+/**
+ * First interval when its beginning is all but the stagnation point: u = a x there and the layer is similar,
+ * so the balances hold from any place on; they are taken from where the speed is a tenth of the next one.
+ */
+function startStep(
+  step: Step,
+  layer: Layer,
+  here: Float64Array,
+  t1: number,
+  u1: number,
+  t: number,
+  u: number,
+  dx: number,
+): void {
+  const { slopes, atLaminar } = step
+  const start = NEAR_STAGNATION * u
+  const part = (u - start) / (u - u1)
+  atLaminar.set(layer.rates[0])
+  atLaminar[LOG_SPEED] += log(start / u1)
+  atLaminar[LOG_SPEED + 4] = 1 / start
+  intervalBalance(step.balance, slopes, LAMINAR, atLaminar, here, 0, t1, start, 0, t, u, part * dx)
+  for (let row = 0; row < 2 * SLOPES; row += SLOPES) {
+    const byLength = (slopes[row + 8] * dx * part) / (u - u1)
+    slopes[row + 7] += NEAR_STAGNATION * slopes[row + 3] - (byLength * u1) / u
+    slopes[row + 3] = byLength
   }
 }
 
