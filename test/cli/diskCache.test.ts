@@ -14,6 +14,7 @@ function result(value: number): TaskResult {
   return {
     kind: 'pressure',
     pressure: {
+      layers: null,
       ...{ method: 'panel', alpha: 0.1, liftCoefficient: 0.5, momentCoefficient: -0.05 },
       ...{ x: values, y: values.slice(), pressureCoefficient: values.slice(), converged: true, reason: '' },
     },

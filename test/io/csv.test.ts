@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import type { Polar, PolarPoint } from '../../src/core'
+import { NO_LIMITS } from '../../src/core/polar/polar'
 import { degrees, polarCsv, polarJson, wingCsv } from '../../src/io/csv'
 import { wingJson } from '../../src/io/wingJson'
 import { comparisonOf, MAPPING, SLOWEST } from '../support/comparisons'
@@ -25,6 +26,7 @@ const polar = (points: PolarPoint[]): Polar => ({
   tripUpper: 1,
   tripLower: 1,
   flap: 0,
+  ...NO_LIMITS,
   points,
 })
 

@@ -20,6 +20,15 @@ export interface PolarPoint {
   readonly reason: string
 }
 
+/** The end of a polar's usable lift. */
+export interface LiftLimit {
+  /** rad */
+  readonly alpha: number
+  readonly liftCoefficient: number
+  /** `layers`: the layers separate and lift falls behind it; `nose`: the suction peak of a thin nose. */
+  readonly by: 'layers' | 'nose'
+}
+
 /** An angle sweep of one section at one state. */
 export interface Polar {
   readonly method: Method
@@ -34,5 +43,14 @@ export interface Polar {
   readonly tripLower: number
   /** Plain flap deflection, rad, trailing edge down positive. */
   readonly flap: number
+  /** One for each angle asked for. */
   readonly points: readonly PolarPoint[]
+  /** Converged points that the viscous sweep added where the polar bends, by angle; never exported. */
+  readonly between: readonly PolarPoint[]
+  /** Greatest and least section lift; null where the polar does not reach them or the method has none. */
+  readonly maxLift: LiftLimit | null
+  readonly minLift: LiftLimit | null
 }
+
+/** What a polar without boundary layers has to say of its ends. */
+export const NO_LIMITS = { between: [], maxLift: null, minLift: null } as const

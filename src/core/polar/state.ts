@@ -1,3 +1,4 @@
+import type { SurfaceLayers } from '../flow/surfaceLayers'
 import type { Method, Surface } from './polar'
 
 /** The state at which one section is computed. Plain data: it crosses to a worker and names a cached result. */
@@ -30,6 +31,8 @@ export interface PressureResult {
   readonly x: Float64Array
   readonly y: Float64Array
   readonly pressureCoefficient: Float64Array
+  /** Both boundary layers; null without the viscous method or when not converged. */
+  readonly layers: SurfaceLayers | null
   readonly converged: boolean
   readonly reason: string
 }

@@ -5,8 +5,9 @@ import { checkMach } from '../flow/compressibility'
 import { BadInput } from '../numerics/errors'
 import { placePanels } from '../shape/panels'
 import type { Section } from '../shape/section'
-import type { Polar, PolarPoint } from './polar'
+import { NO_LIMITS, type Polar, type PolarPoint } from './polar'
 import type { Operating, PressureResult, SectionState } from './state'
+import { viscousPressure, viscousSweep } from './viscousSweep'
 
 /** Fields that a method without a boundary layer leaves empty. */
 const NO_BOUNDARY_LAYER = { dragCoefficient: null, transitionUpper: null, transitionLower: null } as const
@@ -17,13 +18,25 @@ const NO_BOUNDARY_LAYER = { dragCoefficient: null, transitionUpper: null, transi
  * or a Mach number outside its range.
  */
 export function sweep(section: Section, state: SectionState, alphas: readonly number[]): Polar {
+  if (state.method === 'viscous') return viscousSweep(section, state, alphas)
   checkState(state)
   const absurd = alphas.find((alpha) => !Number.isFinite(alpha))
   if (absurd !== undefined) throw new BadInput(`angle of attack ${absurd}: give a finite angle`)
   const points = pointsOf(section, state, alphas)
   const { method, surface, tripUpper, tripLower, flap } = state
   const mach = method === 'thin' ? 0 : state.mach
-  return { method, reynolds: null, mach, surface, amplification: null, tripUpper, tripLower, flap, points }
+  return {
+    method,
+    reynolds: null,
+    mach,
+    surface,
+    amplification: null,
+    tripUpper,
+    tripLower,
+    flap,
+    points,
+    ...NO_LIMITS,
+  }
 }
 
 /** Throws BadInput for what these methods do not compute. */
@@ -33,16 +46,9 @@ function checkState({ flap, mach, method }: SectionState): void {
 }
 
 function pointsOf(section: Section, state: SectionState, alphas: readonly number[]): readonly PolarPoint[] {
-  switch (state.method) {
-    case 'thin':
-      return thinPoints(section, alphas)
-    case 'panel': {
-      const flow = solvePanels(placePanels(section, state.panels))
-      return alphas.map((alpha) => panelPoint(panelLoads(flow, alpha, state.mach), flow.solved))
-    }
-    case 'viscous':
-      return noViscousMethod()
-  }
+  if (state.method === 'thin') return thinPoints(section, alphas)
+  const flow = solvePanels(placePanels(section, state.panels))
+  return alphas.map((alpha) => panelPoint(panelLoads(flow, alpha, state.mach), flow.solved))
 }
 
 /** Lift 2 pi (alpha - zero-lift angle) and the constant moment of thin-airfoil theory. */
@@ -75,7 +81,7 @@ export function pressureAt(section: Section, state: SectionState, at: Operating)
   if (state.method === 'thin') {
     throw new BadInput('thin-airfoil theory gives no surface pressure; use the panel method')
   }
-  if (state.method === 'viscous') return noViscousMethod()
+  if (state.method === 'viscous') return viscousPressure(section, state, at)
   checkState(state)
   const asked = 'alpha' in at ? at.alpha : at.lift
   if (!Number.isFinite(asked)) throw new BadInput(`angle or lift coefficient ${asked}: give a finite value`)
@@ -98,6 +104,7 @@ export function pressureAt(section: Section, state: SectionState, at: Operating)
     x,
     y,
     pressureCoefficient,
+    layers: null,
     converged: true,
     reason,
   }
@@ -113,11 +120,8 @@ function notConverged(state: SectionState, alpha: number, reason: string): Press
     x: none,
     y: none,
     pressureCoefficient: none,
+    layers: null,
     converged: false,
     reason,
   }
-}
-
-function noViscousMethod(): never {
-  throw new BadInput('the viscous method is not available')
 }

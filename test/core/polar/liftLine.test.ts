@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { liftLine } from '../../../src/core/polar/liftLine'
-import type { Polar } from '../../../src/core/polar/polar'
+import { NO_LIMITS, type Polar } from '../../../src/core/polar/polar'
 
 const polarOf = (
   points: readonly (readonly [alpha: number, lift: number, converged?: boolean])[],
@@ -13,6 +13,7 @@ const polarOf = (
   tripUpper: 1,
   tripLower: 1,
   flap: 0,
+  ...NO_LIMITS,
   points: points.map(([alpha, liftCoefficient, converged = true]) => ({
     alpha,
     liftCoefficient,
