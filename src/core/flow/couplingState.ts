@@ -68,18 +68,26 @@ export function layersAt(
   for (let i = 0; i < lower.count; i++) lower.x[i] = s[stagnation + 1 + i] - middle
   wake.x.set(wakeS)
   wake.kind.fill(WAKE)
+  return { stagnation, upper, lower, wake, ...lawsOf(flow, stagnation, upper, lower, setting) }
+}
+
+/** The same layers under the transition laws of another setting. */
+export function withLaws(flow: PanelFlow, layers: Layers, setting: ViscousSetting): Layers {
+  return { ...layers, ...lawsOf(flow, layers.stagnation, layers.upper, layers.lower, setting) }
+}
+
+function lawsOf(
+  flow: PanelFlow,
+  stagnation: number,
+  upper: Layer,
+  lower: Layer,
+  { amplification, tripUpper, tripLower }: ViscousSetting,
+): { upperLaw: TransitionLaw; lowerLaw: TransitionLaw } {
   const law = (layer: Layer, side: number, trip: number): TransitionLaw => ({
-    amplification: setting.amplification,
+    amplification,
     forcedAt: tripPlace(flow, layer, stagnation, side, trip),
   })
-  return {
-    stagnation,
-    upper,
-    lower,
-    wake,
-    upperLaw: law(upper, 0, setting.tripUpper),
-    lowerLaw: law(lower, 1, setting.tripLower),
-  }
+  return { upperLaw: law(upper, 0, tripUpper), lowerLaw: law(lower, 1, tripLower) }
 }
 
 /** Distance along a layer at which x/c reaches `trip` on the way to the trailing edge; Infinity when free. */

@@ -1,5 +1,6 @@
 import { atan2, cos, hypot, log, sin } from '../numerics/elementary'
 import { factorInPlace, solveInPlace, type Factors } from '../numerics/denseSolve'
+import type { Panels } from '../shape/panels'
 import { panelMatrix, type PanelFlow } from './vortexPanels'
 
 /**
@@ -25,8 +26,24 @@ interface Velocity {
 export interface SurfaceAnswer {
   readonly flow: PanelFlow
   readonly factors: Factors
+  /** Vorticity at the nodes for a unit stream along and across the chord. */
+  readonly along: Float64Array
+  readonly across: Float64Array
   /** (n + 1) x n: vorticity at node i for unit source strength on panel j. */
   readonly gamma: Float64Array
+}
+
+/**
+ * Last equation of a sharp edge under layers: the mean speed of the two sides is that of the next pair of
+ * nodes. Under layers the speed is nearly level there; the straight continuation of potential flow answers
+ * to a kink in the displacement with more than its own size, and near laminar separation at the edge the
+ * equations then have no solution, or several (12 of 370 points instead of none).
+ */
+function levelEdge({ x }: Panels, row: Float64Array): void {
+  const n = x.length - 1
+  row[0] = 1
+  row[1] = -0.5
+  row[n - 1] = 0.5
 }
 
 /** Stream function at a point for unit sources on a panel, its angle counted from (ax, ay). */
@@ -46,7 +63,11 @@ export function surfaceAnswer(flow: PanelFlow): SurfaceAnswer {
   const { x, y } = flow.panels
   const n = x.length - 1
   const size = n + 1
-  const factors = factorInPlace(panelMatrix(flow.panels, flow.edge), size)
+  const factors = factorInPlace(panelMatrix(flow.panels, flow.edge, levelEdge), size)
+  const along = Float64Array.from(y, (value) => -value)
+  const across = Float64Array.from(x)
+  finish(flow, factors, along)
+  finish(flow, factors, across)
   const gamma = new Float64Array(size * n)
   const column = new Float64Array(size)
   for (let j = 0; j < n; j++) {
@@ -62,7 +83,7 @@ export function surfaceAnswer(flow: PanelFlow): SurfaceAnswer {
     finish(flow, factors, column)
     for (let i = 0; i <= n; i++) gamma[i * n + j] = column[i]
   }
-  return { flow, factors, gamma }
+  return { flow, factors, along, across, gamma }
 }
 
 /** Solves one column; the sharp edge's last equation has no stream function and its value is set by the first. */
@@ -130,7 +151,7 @@ const WAKE_LENGTH = 1
 export const WAKE_STATIONS = 24
 
 /** The wake as a streamline of the potential flow at `alpha` (rad), stretched from the last panels' length. */
-export function traceWake(flow: PanelFlow, alpha: number): Wake {
+export function traceWake({ flow, along, across }: SurfaceAnswer, alpha: number): Wake {
   const { x: px, y: py } = flow.panels
   const n = px.length - 1
   const first = 0.5 * (hypot(px[1] - px[0], py[1] - py[0]) + hypot(px[n] - px[n - 1], py[n] - py[n - 1]))
@@ -152,7 +173,7 @@ export function traceWake(flow: PanelFlow, alpha: number): Wake {
     let u = ca
     let v = sa
     for (let i = 0; i <= n; i++) {
-      const g = flow.along[i] * ca + flow.across[i] * sa
+      const g = along[i] * ca + across[i] * sa
       u += g * vu[i]
       v += g * vv[i]
     }
@@ -228,8 +249,8 @@ export function displacementAnswer(surface: SurfaceAnswer, wake: Wake): Displace
   }
   const along = new Float64Array(size)
   const across = new Float64Array(size)
-  along.set(flow.along)
-  across.set(flow.across)
+  along.set(surface.along)
+  across.set(surface.across)
   const [vu, vv] = [new Float64Array(nodes), new Float64Array(nodes)]
   const [su, sv] = [new Float64Array(n), new Float64Array(n)]
   for (let k = 1; k <= w; k++) {
@@ -246,8 +267,8 @@ export function displacementAnswer(surface: SurfaceAnswer, wake: Wake): Displace
     for (let j = 0; j < n; j++) bySource[at + j] = su[j] * tx + sv[j] * ty
     for (let i = 0; i < nodes; i++) {
       const g = vu[i] * tx + vv[i] * ty
-      along[row] += g * flow.along[i]
-      across[row] += g * flow.across[i]
+      along[row] += g * along[i]
+      across[row] += g * across[i]
       const from = i * sources
       for (let j = 0; j < sources; j++) bySource[at + j] += g * bySource[from + j]
     }

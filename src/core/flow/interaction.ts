@@ -1,7 +1,7 @@
 import { cos, sin } from '../numerics/elementary'
 import { factorInPlace, solveInPlace } from '../numerics/denseSolve'
 import { LAMINAR, WAKE } from './boundaryLayer/stationRates'
-import { marchLayer, type EdgeLaw } from './boundaryLayer/march'
+import { marchLayer, STEEPEST, type EdgeLaw } from './boundaryLayer/march'
 import { newStep, type Step } from './boundaryLayer/stationStep'
 import type { Layer, TransitionLaw } from './boundaryLayer/layer'
 import { linearise, newAnswers, type Answers } from './couplingSystem'
@@ -73,15 +73,22 @@ export function answerAt(section: ViscousSection, alpha: number): DisplacementAn
   const key = Math.round(alpha / WAKE_STEP)
   const known = section.answers.get(key)
   if (known) return known
-  const answer = displacementAnswer(section.surface, traceWake(section.flow, key * WAKE_STEP))
+  const answer = displacementAnswer(section.surface, traceWake(section.surface, key * WAKE_STEP))
   section.answers.set(key, answer)
   return answer
 }
 
+/**
+ * Weight of a station's own answer in the local law. The neighbours' defects move with its own, so more than
+ * the diagonal alone is felt; of 0.5, 1, 1.5, 2, 3, 4 and 10 those from 1.5 to 3 left the fewest points unsolved.
+ */
+const LOCAL_SHARE = 2
+
 /** Sizes of the answers of edge speed to its own station's mass defect: the local interaction law. */
 function edgeLaw(layer: Layer, answer: DisplacementAnswer, node: (i: number) => number): EdgeLaw {
   const own = new Float64Array(layer.count)
-  for (let i = 0; i < layer.count; i++) own[i] = Math.abs(answer.matrix[node(i) * (answer.size + 1)])
+  for (let i = 0; i < layer.count; i++)
+    own[i] = LOCAL_SHARE * Math.abs(answer.matrix[node(i) * (answer.size + 1)])
   return { speed: Float64Array.from(layer.u), answer: own, defect: Float64Array.from(layer.m) }
 }
 
@@ -92,6 +99,7 @@ export function remarch(
   answer: DisplacementAnswer,
   setting: ViscousSetting,
   warm: boolean,
+  steepest: number,
 ): boolean {
   const { stagnation, upper, lower, wake } = layers
   const nodes = upper.count + lower.count
@@ -103,12 +111,12 @@ export function remarch(
   startLayers(layers, section.s, setting.stream)
   for (const [layer, law, side] of sides) {
     const edge = edgeLaw(layer, answer, (i) => nodeOf(stagnation, side, i))
-    sound = marchLayer(layer, section.step, setting.stream, law, edge, 1, warm) < 0 && sound
+    sound = marchLayer(layer, section.step, setting.stream, law, edge, 1, warm, steepest) < 0 && sound
   }
   const edge = edgeLaw(wake, answer, (k) => (k === 0 ? 0 : nodes + k - 1))
   joinWake(layers, setting.stream)
   const free = { amplification: Infinity, forcedAt: Infinity }
-  return marchLayer(wake, section.step, setting.stream, free, edge, 1, warm) < 0 && sound
+  return marchLayer(wake, section.step, setting.stream, free, edge, 1, warm, steepest) < 0 && sound
 }
 
 /** Layers from nothing: speeds of the potential flow, marched once. */
@@ -119,7 +127,7 @@ export function coldLayers(section: ViscousSection, alpha: number, setting: Visc
   const speed = Float64Array.from(answer.along, (a, i) => a * ca + answer.across[i] * sa)
   const layers = layersAt(section.flow, section.s, stagnationNode(speed, nodes), answer.wake.s, setting)
   setSpeeds(layers, speed)
-  remarch(section, layers, answer, setting, false)
+  remarch(section, layers, answer, setting, false, STEEPEST)
   return layers
 }
 
@@ -140,9 +148,14 @@ function setSpeeds({ upper, lower, wake, stagnation }: Layers, speed: Float64Arr
 /** Edge speed kept at a first station when the stagnation point falls on its node. */
 const LEAST_SPEED = 1e-7
 
+/** Relative change below which a step is small: layers may then be as steep as they like. */
+const SMALL_STEP = 0.1
+
 /** Greatest relative changes that a full step may make. */
 const GREATEST_RELATIVE = 0.6
 const GREATEST_SPEED_CHANGE = 0.25
+/** A step is not shortened further for the sake of a few stations: those are held back alone. */
+const LEAST_SCALE = 0.1
 
 /**
  * Solves layers, wake and potential flow together by Newton's method from `start` (used up) at a fixed
@@ -162,10 +175,12 @@ export function solveAtAngle(
   const change = new Float64Array(size)
   let layers = start
   let residual = Infinity
+  let last = Infinity
+  let released = false
   let best = Infinity
   let idle = 0
   for (let n = 0; n < MOST_ITERATIONS; n++) {
-    remarch(section, layers, answer, setting, true)
+    remarch(section, layers, answer, setting, true, released ? Infinity : STEEPEST)
     joinWake(layers, setting.stream)
     const balance = linearise(
       rows,
@@ -192,13 +207,14 @@ export function solveAtAngle(
     if (!(residual < 1e6)) break
     idle = residual < 0.7 * best ? 0 : idle + 1
     best = Math.min(best, residual)
+    if (last < SMALL_STEP && idle >= 2) released = true
     // A transition that hops between two intervals keeps full steps from settling: shorter ones do not overshoot.
     const share = idle < PATIENCE ? 1 : idle % 2 === 0 ? 0.5 : 0.25
     if (residual < CONVERGED) return { alpha, layers, answer, converged: true, residual, iterations: n }
     const factors = factorInPlace(matrix, size)
     if (factors.singular) break
     solveInPlace(factors, change)
-    layers = apply(section, setting, layers, rows, change, answer, share)
+    ;({ layers, last } = apply(section, setting, layers, rows, change, answer, share))
   }
   return { alpha, layers, answer, converged: false, residual, iterations: MOST_ITERATIONS }
 }
@@ -212,7 +228,7 @@ function apply(
   change: Float64Array,
   answer: DisplacementAnswer,
   share: number,
-): Layers {
+): { layers: Layers; last: number } {
   const { size } = rows
   const { upper, lower, wake, stagnation } = layers
   const nodes = upper.count + lower.count
@@ -230,7 +246,9 @@ function apply(
     ;[dq[g], dt[g], du[g]] = [q, t, u]
   }
   let scale = share
+  let last = 0
   const limit = (size: number, most: number): void => {
+    last = Math.max(last, size)
     if (size * scale > most) scale = most / size
   }
   const parts: readonly (readonly [Layer, (i: number) => number, number])[] = [
@@ -247,16 +265,19 @@ function apply(
       limit(Math.abs(du[g]), GREATEST_SPEED_CHANGE)
     }
   }
+  scale = Math.max(scale, LEAST_SCALE)
   for (const [layer, at, first] of parts) {
     for (let i = first; i < layer.count; i++) {
       const g = at(i)
-      layer.q[i] = Math.max(layer.q[i] + scale * dq[g], layer.kind[i] === LAMINAR ? 0 : 1e-4)
-      layer.t[i] = Math.max(layer.t[i] + scale * dt[g], 0.2 * layer.t[i])
-      layer.m[i] = Math.max(layer.m[i] + scale * change[g], 0.2 * layer.m[i])
-      layer.u[i] += scale * du[g]
+      const within = (change: number, most: number): number => Math.max(-most, Math.min(most, scale * change))
+      if (layer.kind[i] === LAMINAR) layer.q[i] = Math.max(layer.q[i] + scale * dq[g], 0)
+      else layer.q[i] += within(dq[g], GREATEST_RELATIVE * layer.q[i])
+      layer.t[i] += within(dt[g], GREATEST_RELATIVE * layer.t[i])
+      layer.m[i] += within(change[g], GREATEST_RELATIVE * layer.m[i])
+      layer.u[i] += within(du[g], GREATEST_SPEED_CHANGE)
     }
   }
-  return placeStagnation(section, setting, layers, answer)
+  return { layers: placeStagnation(section, setting, layers, answer), last }
 }
 
 /** Rebuilds the layers when the speed at a first station has changed sign. */

@@ -26,7 +26,7 @@ export interface PanelFlow {
  * The outline is a streamline: the stream function has one unknown value at all nodes. The flow leaves the
  * trailing edge smoothly: the vorticity of its two sides is equal and opposite. On a blunt edge the gap
  * panel carries the jump to the fluid behind it. On a sharp edge the first and last node coincide and give
- * the same equation; in its place the edge speed continues the mean speed of both sides (see edgeRow).
+ * the same equation; in its place the edge speed continues the mean speed of both sides (see straightEdge).
  * The matrix does not depend on the angle: one factorisation serves all.
  *
  * Errors fall with the square of the panel count (chords of a curve, vorticity linear on them). At 4 deg on
@@ -64,11 +64,14 @@ export function solvePanels(panels: Panels): PanelFlow {
   return { panels, edge, weights, along, across, solved: true }
 }
 
+/** Fills the last equation of a sharp edge. */
+export type EdgeRow = (panels: Panels, row: Float64Array) => void
+
 /**
  * Matrix of the panel equations, row by row, one row a node. The unknowns are the vorticity at all nodes but
  * the last, whose vorticity is minus the first, and in its place the stream function of the outline.
  */
-export function panelMatrix(panels: Panels, edge: TrailingEdge): Float64Array {
+export function panelMatrix(panels: Panels, edge: TrailingEdge, row: EdgeRow = straightEdge): Float64Array {
   const n = panels.x.length - 1
   const size = n + 1
   const matrix = new Float64Array(size * size)
@@ -81,7 +84,7 @@ export function panelMatrix(panels: Panels, edge: TrailingEdge): Float64Array {
   }
   if (edge.sharp) {
     matrix.fill(0, n * size)
-    edgeRow(panels, matrix.subarray(n * size))
+    row(panels, matrix.subarray(n * size))
   }
   return matrix
 }
@@ -92,7 +95,7 @@ export function panelMatrix(panels: Panels, edge: TrailingEdge): Float64Array {
  * difference of two nearly equal equations. The edge speed is its straight continuation through the next
  * two pairs of nodes. A parabola through three would change the lift by 3e-7 (cusp) to 1e-5 at 180 panels.
  */
-function edgeRow({ x, y }: Panels, row: Float64Array): void {
+function straightEdge({ x, y }: Panels, row: Float64Array): void {
   const n = x.length - 1
   const distance = (k: number): number =>
     0.5 * (hypot(x[k] - x[0], y[k] - y[0]) + hypot(x[n - k] - x[n], y[n - k] - y[n]))

@@ -1,32 +1,104 @@
+import { copyLayers, withLaws, type ViscousSetting } from '../flow/couplingState'
 import { coldLayers, solveAtAngle, type ViscousSection, type ViscousSolution } from '../flow/interaction'
-import { copyLayers, type ViscousSetting } from '../flow/couplingState'
-
-/** Least step of the angle when a point is approached from a solved neighbour, rad. */
-const STEPS_BETWEEN = 4
 
 /**
- * Solves at `alpha` from a neighbouring solution, else from nothing, else by smaller steps of the angle from
- * the neighbour. Bounded: at most 2 + STEPS_BETWEEN iterations of Newton's method, each bounded itself.
+ * Solutions of a section at many angles, each found in a way that does not depend on which was solved before.
+ *
+ * Where a layer stays laminar up to the trailing edge the equations have several solutions: a laminar
+ * separation there takes lift away, and the lost lift keeps the separation going. The one that continues
+ * the flow with a turbulent edge is taken: each angle is first solved with transition at the latest at GUARD
+ * on both sides, which has one solution, and then let free from there.
  */
+
+/** x/c at which transition is forced in the first solution. */
+const GUARD = 0.95
+/** Angles aside from which a branch is followed back, rad. */
+const ASIDE = [-1, 1, -2, 2].map((degrees) => (degrees * Math.PI) / 180)
+/** Halvings of the step of the angle when a point is approached from a solved neighbour. */
+const MOST_HALVINGS = 4
+
+/** A point of a march: its solution, and the guarded one from which neighbours start. */
+export interface MarchedPoint {
+  readonly solution: ViscousSolution
+  readonly guarded: ViscousSolution
+}
+
+/** Solves at `alpha` (rad), starting from the guarded solution of a neighbour where there is one. */
 export function solvePoint(
   section: ViscousSection,
   setting: ViscousSetting,
   alpha: number,
   neighbour: ViscousSolution | null,
+): MarchedPoint {
+  const guarded = approach(section, guardedSetting(setting, GUARD), alpha, neighbour, MOST_HALVINGS)
+  if (!guarded.converged) return { solution: guarded, guarded }
+  const { upper, lower } = guarded.layers
+  const held =
+    (upper.transition.forced && setting.tripUpper > GUARD) ||
+    (lower.transition.forced && setting.tripLower > GUARD)
+  if (!held) return { solution: guarded, guarded }
+  return { solution: release(section, setting, guarded), guarded }
+}
+
+/**
+ * Lets a guarded solution free. Between two branches there may be no solution near the guarded one; then the
+ * free solutions at angles aside, found in the same way, are followed to this angle.
+ */
+function release(
+  section: ViscousSection,
+  setting: ViscousSetting,
+  guarded: ViscousSolution,
+): ViscousSolution {
+  const free = letFree(section, setting, guarded)
+  if (free.converged) return free
+  for (const aside of ASIDE) {
+    const there = solveAtAngle(
+      section,
+      guardedSetting(setting, GUARD),
+      copyLayers(guarded.layers),
+      guarded.alpha + aside,
+    )
+    if (!there.converged) continue
+    const freeThere = letFree(section, setting, there)
+    if (!freeThere.converged) continue
+    const back = solveAtAngle(section, setting, copyLayers(freeThere.layers), guarded.alpha)
+    if (back.converged) return back
+  }
+  const cold = solveAtAngle(section, setting, coldLayers(section, guarded.alpha, setting), guarded.alpha)
+  return cold.converged ? cold : free
+}
+
+function letFree(
+  section: ViscousSection,
+  setting: ViscousSetting,
+  { alpha, layers }: ViscousSolution,
+): ViscousSolution {
+  return solveAtAngle(section, setting, withLaws(section.flow, copyLayers(layers), setting), alpha)
+}
+
+function guardedSetting(setting: ViscousSetting, guard: number): ViscousSetting {
+  const { tripUpper, tripLower } = setting
+  return { ...setting, tripUpper: Math.min(tripUpper, guard), tripLower: Math.min(tripLower, guard) }
+}
+
+/** From a neighbour, else from nothing, else by way of the angle half way from the neighbour or from zero. */
+function approach(
+  section: ViscousSection,
+  setting: ViscousSetting,
+  alpha: number,
+  neighbour: ViscousSolution | null,
+  halvings: number,
 ): ViscousSolution {
   if (neighbour) {
     const next = solveAtAngle(section, setting, copyLayers(neighbour.layers), alpha)
     if (next.converged) return next
   }
   const cold = solveAtAngle(section, setting, coldLayers(section, alpha, setting), alpha)
-  if (cold.converged || !neighbour) return cold
-  let between = neighbour
-  for (let k = 1; k <= STEPS_BETWEEN; k++) {
-    const at = neighbour.alpha + ((alpha - neighbour.alpha) * k) / STEPS_BETWEEN
-    between = solveAtAngle(section, setting, copyLayers(between.layers), at)
-    if (!between.converged) return cold.residual < between.residual ? cold : { ...between, alpha }
-  }
-  return between
+  if (cold.converged || halvings === 0) return cold
+  const middle = 0.5 * (alpha + (neighbour?.alpha ?? 0))
+  const between = approach(section, setting, middle, neighbour, halvings - 1)
+  if (!between.converged) return cold
+  return solveAtAngle(section, setting, copyLayers(between.layers), alpha)
 }
 
 /** Solutions at `alphas` (rad): from the angle nearest to zero outwards both ways, each from its neighbour. */
@@ -45,10 +117,10 @@ export function solveSweep(
   for (const direction of [1, -1]) {
     let neighbour = first
     for (let k = direction === 1 ? start : start - 1; k >= 0 && k < order.length; k += direction) {
-      const solution: ViscousSolution = solvePoint(section, setting, alphas[order[k]], neighbour)
+      const { solution, guarded } = solvePoint(section, setting, alphas[order[k]], neighbour)
       visit(order[k], solution)
-      if (solution.converged) neighbour = solution
-      if (k === start && solution.converged) first = solution
+      if (guarded.converged) neighbour = guarded
+      if (k === start && guarded.converged) first = guarded
     }
   }
 }

@@ -10,7 +10,7 @@ import { placePanels } from '../shape/panels'
 import type { Section } from '../shape/section'
 import { NO_LIMITS, type Polar, type PolarPoint } from './polar'
 import type { Operating, PressureResult, SectionState } from './state'
-import { solvePoint, solveSweep } from './viscousMarch'
+import { solvePoint, solveSweep, type MarchedPoint } from './viscousMarch'
 
 /** Chord Reynolds numbers for which the closures were fitted. */
 export const LEAST_REYNOLDS = 5e4
@@ -159,15 +159,17 @@ export function viscousPressure(section: Section, state: SectionState, at: Opera
   if (!Number.isFinite(asked)) throw new BadInput(`angle or lift coefficient ${asked}: give a finite value`)
   const ready = readySection(section, state)
   if (ready === null) return noPressure('alpha' in at ? at.alpha : 0, NO_PANELS)
-  if ('alpha' in at) return pressureOf(ready, setting, solvePoint(ready, setting, at.alpha, null))
+  if ('alpha' in at) return pressureOf(ready, setting, solvePoint(ready, setting, at.alpha, null).solution)
   const first = alphaForLift(ready.flow, at.lift, state.mach)
   if (first === null) return noPressure(0, 'no angle gives this lift coefficient')
   let alpha = first
   let slope = 5.5
   let before: { alpha: number; lift: number } | null = null
-  let solution: ViscousSolution | null = null
+  let guarded: ViscousSolution | null = null
   for (let n = 0; n < LIFT_STEPS; n++) {
-    solution = solvePoint(ready, setting, alpha, solution)
+    const point: MarchedPoint = solvePoint(ready, setting, alpha, guarded)
+    const { solution } = point
+    guarded = point.guarded
     if (!solution.converged) return noPressure(alpha, failureOf(solution))
     const lift = viscousLoads(ready.flow, solution, setting.stream).liftCoefficient
     if (Math.abs(lift - at.lift) < LIFT_TOLERANCE) return pressureOf(ready, setting, solution)

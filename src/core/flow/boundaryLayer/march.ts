@@ -36,8 +36,10 @@ export function marchLayer(
   edge: EdgeLaw,
   from: number,
   warm: boolean,
+  steepest = Infinity,
 ): number {
   let failed = -1
+  const { kind, transition, x } = layer
   layer.transition.at = layer.kind[0] === LAMINAR ? layer.count : -1
   refreshRates(layer, stream, 0, from)
   for (let i = from; i < layer.count; i++) {
@@ -45,9 +47,48 @@ export function marchLayer(
     setKind(layer, step, i, law)
     if (!warm || old !== layer.kind[i]) guessFromBefore(layer, i, stream, warm)
     if (!warm && edge.answer[i] > 0) predict(layer, edge, i)
-    if (!solveStation(layer, step, i, stream, edge) && failed < 0) failed = i
+    let solved = solveStation(layer, step, i, stream, edge)
+    if (kind[i - 1] === TURBULENT && i !== transition.at) {
+      const most = shapeOf(layer, i - 1) + (steepest * (x[i] - x[i - 1])) / layer.t[i - 1]
+      if (shapeOf(layer, i) > most) solved = solveAtShape(layer, step, i, stream, most)
+    }
+    if (!solved && failed < 0) failed = i
   }
   return failed
+}
+
+/**
+ * Greatest rise t dH/dx of a turbulent layer. Layers that separate on the way to the stall reach 0.25; the
+ * balances over one short interval have a second, false root beyond, separated in a single step.
+ */
+export const STEEPEST = 0.3
+
+const shapeOf = ({ m, u, t }: Layer, i: number): number => m[i] / (u[i] * t[i])
+
+/** Newton's method for (q, t, u) of a turbulent station whose shape factor is given. */
+function solveAtShape(layer: Layer, step: Step, i: number, stream: Stream, H: number): boolean {
+  const { q, t, m, u } = layer
+  q[i] = q[i - 1]
+  t[i] = t[i - 1]
+  u[i] = u[i - 1]
+  for (let n = 0; n < MOST_STEPS; n++) {
+    stationStep(step, layer, i, stream, q[i], t[i], H * t[i], u[i])
+    m[i] = u[i] * H * t[i]
+    const { balance, here } = step
+    if (Math.abs(balance[0]) + Math.abs(balance[1]) + Math.abs(balance[2]) < SOLVED) return true
+    for (let r = 0; r < 3; r++) {
+      here[4 * r + 1] += H * here[4 * r + 2]
+      here[4 * r + 2] = here[4 * r + 3]
+    }
+    const change = solve3(step, (r) => here[4 * r + 2])
+    if (change === null) return false
+    const most = Math.max(Math.abs(change[0]) / q[i], Math.abs(change[1]) / t[i], Math.abs(change[2]) / u[i])
+    const scale = Math.min(1, GREATEST_CHANGE / most)
+    q[i] += scale * change[0]
+    t[i] += scale * change[1]
+    u[i] += scale * change[2]
+  }
+  return false
 }
 
 function refreshRates(layer: Layer, stream: Stream, first: number, end: number): void {
