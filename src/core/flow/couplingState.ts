@@ -1,5 +1,6 @@
 import { cos, hypot, sin } from '../numerics/elementary'
 import { emptyLayer, type Layer, type TransitionLaw } from './boundaryLayer/layer'
+import { refreshStation } from './boundaryLayer/march'
 import { stagnationLayer } from './boundaryLayer/stagnation'
 import {
   EQUILIBRIUM,
@@ -8,7 +9,6 @@ import {
   stationRates,
   TURBULENT,
   WAKE,
-  type LayerKind,
   type Stream,
 } from './boundaryLayer/stationRates'
 import { STARTING_SHEAR_SHARE } from './boundaryLayer/turbulentClosure'
@@ -113,18 +113,12 @@ export function startLayers({ upper, lower, stagnation }: Layers, s: Float64Arra
     layer.q[0] = 0
     layer.t[0] = t
     layer.m[0] = layer.u[0] * START.shape * t
-    refresh(layer, 0, stream)
+    refreshStation(layer, 0, stream)
   }
 }
 
 export const STAGNATION_SHAPE = START.shape
 export const STAGNATION_THICKNESS = START.thickness
-
-/** Recomputes the rates of one station. */
-export function refresh(layer: Layer, i: number, stream: Stream): void {
-  const { kind, q, t, m, u, rates } = layer
-  stationRates(rates[i], kind[i] as LayerKind, stream, q[i], t[i], m[i] / u[i], u[i])
-}
 
 const scratch = new Float64Array(RATES_LENGTH)
 
@@ -145,7 +139,7 @@ export function joinWake({ upper, lower, wake }: Layers, stream: Stream): void {
   wake.m[0] = upper.m[a] + lower.m[b]
   wake.u[0] = 0.5 * (upper.u[a] + lower.u[b])
   wake.q[0] = (edgeShear(upper, stream) * upper.t[a] + edgeShear(lower, stream) * lower.t[b]) / wake.t[0]
-  refresh(wake, 0, stream)
+  refreshStation(wake, 0, stream)
 }
 
 /** Sizes of speed and mass defect in node order, then wake: where station values go in the linear relation. */

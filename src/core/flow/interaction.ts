@@ -154,6 +154,8 @@ const SMALL_STEP = 0.1
 /** Greatest relative changes that a full step may make. */
 const GREATEST_RELATIVE = 0.6
 const GREATEST_SPEED_CHANGE = 0.25
+/** Least shape factor after a step; closures have none below 1, and false solutions with such layers exist. */
+const LEAST_SHAPE = 1.05
 /** A step is not shortened further for the sake of a few stations: those are held back alone. */
 const LEAST_SCALE = 0.1
 
@@ -210,13 +212,20 @@ export function solveAtAngle(
     if (last < SMALL_STEP && idle >= 2) released = true
     // A transition that hops between two intervals keeps full steps from settling: shorter ones do not overshoot.
     const share = idle < PATIENCE ? 1 : idle % 2 === 0 ? 0.5 : 0.25
-    if (residual < CONVERGED) return { alpha, layers, answer, converged: true, residual, iterations: n }
+    if (residual < CONVERGED) {
+      return { alpha, layers, answer, converged: isSound(layers), residual, iterations: n }
+    }
     const factors = factorInPlace(matrix, size)
     if (factors.singular) break
     solveInPlace(factors, change)
     ;({ layers, last } = apply(section, setting, layers, rows, change, answer, share))
   }
   return { alpha, layers, answer, converged: false, residual, iterations: MOST_ITERATIONS }
+}
+
+/** Whether every shape factor on the surface is above one, as that of a real layer is. */
+function isSound({ upper, lower }: Layers): boolean {
+  return [upper, lower].every(({ m, u, t }) => m.every((defect, i) => i === 0 || defect > u[i] * t[i]))
 }
 
 /** Adds a step, shortened so that no variable changes too much; moves the stagnation point when it must. */
@@ -269,16 +278,29 @@ function apply(
   for (const [layer, at, first] of parts) {
     for (let i = first; i < layer.count; i++) {
       const g = at(i)
+      if (i === 0 && layer !== wake) {
+        // Its thickness and mass defect follow from the speed.
+        layer.u[0] += Math.max(-GREATEST_SPEED_CHANGE, Math.min(GREATEST_SPEED_CHANGE, scale * du[g]))
+        continue
+      }
       const within = (change: number, most: number): number => Math.max(-most, Math.min(most, scale * change))
       if (layer.kind[i] === LAMINAR) layer.q[i] = Math.max(layer.q[i] + scale * dq[g], 0)
       else layer.q[i] += within(dq[g], GREATEST_RELATIVE * layer.q[i])
       layer.t[i] += within(dt[g], GREATEST_RELATIVE * layer.t[i])
       layer.m[i] += within(change[g], GREATEST_RELATIVE * layer.m[i])
       layer.u[i] += within(du[g], GREATEST_SPEED_CHANGE)
+      if (layer !== wake) layer.m[i] = Math.max(layer.m[i], LEAST_SHAPE * layer.t[i] * layer.u[i])
     }
   }
   return { layers: placeStagnation(section, setting, layers, answer), last }
 }
+
+/**
+ * How far the stagnation point may lie beyond its interval before it is moved to the next, as a share of the
+ * interval. Neighbouring intervals are not quite alike: without a band in which both serve, a point on a node
+ * would be passed to and fro.
+ */
+const FAR_SIDE = 0.1
 
 /** Rebuilds the layers when the speed at a first station has changed sign. */
 export function placeStagnation(
@@ -290,11 +312,15 @@ export function placeStagnation(
   const { upper, lower, wake, stagnation } = layers
   const nodes = upper.count + lower.count
   let to = stagnation
-  for (let i = 0; i < upper.count - 4 && upper.u[i] <= 0; i++) to--
-  if (to === stagnation) for (let i = 0; i < lower.count - 4 && lower.u[i] <= 0; i++) to++
+  const far = (layer: Layer, other: Layer, i: number): boolean =>
+    layer.u[i] < (i === 0 && layer.transition.at > 1 ? -FAR_SIDE * other.u[0] : 0)
+  for (let i = 0; i < upper.count - 4 && far(upper, lower, i); i++) to--
+  if (to === stagnation) for (let i = 0; i < lower.count - 4 && far(lower, upper, i); i++) to++
   if (to === stagnation) {
-    for (const layer of [upper, lower])
-      for (let i = 0; i < layer.count; i++) layer.u[i] = Math.max(layer.u[i], LEAST_SPEED)
+    for (const layer of [upper, lower]) {
+      for (let i = 1; i < layer.count; i++) layer.u[i] = Math.max(layer.u[i], LEAST_SPEED)
+      if (Math.abs(layer.u[0]) < LEAST_SPEED) layer.u[0] = LEAST_SPEED
+    }
     return layers
   }
   const moved = layersAt(section.flow, section.s, to, answer.wake.s, setting)

@@ -81,7 +81,7 @@ function guardedSetting(setting: ViscousSetting, guard: number): ViscousSetting 
   return { ...setting, tripUpper: Math.min(tripUpper, guard), tripLower: Math.min(tripLower, guard) }
 }
 
-/** From a neighbour, else from nothing, else by way of the angle half way from the neighbour or from zero. */
+/** From a neighbour, else from nothing, else by way of the angle half way to the neighbour or of angles aside. */
 function approach(
   section: ViscousSection,
   setting: ViscousSetting,
@@ -95,10 +95,14 @@ function approach(
   }
   const cold = solveAtAngle(section, setting, coldLayers(section, alpha, setting), alpha)
   if (cold.converged || halvings === 0) return cold
-  const middle = 0.5 * (alpha + (neighbour?.alpha ?? 0))
-  const between = approach(section, setting, middle, neighbour, halvings - 1)
-  if (!between.converged) return cold
-  return solveAtAngle(section, setting, copyLayers(between.layers), alpha)
+  const places = neighbour ? [0.5 * (alpha + neighbour.alpha)] : ASIDE.map((aside) => alpha + aside)
+  for (const place of places) {
+    const between = approach(section, setting, place, neighbour, neighbour ? halvings - 1 : 0)
+    if (!between.converged) continue
+    const next = solveAtAngle(section, setting, copyLayers(between.layers), alpha)
+    if (next.converged) return next
+  }
+  return cold
 }
 
 /** Solutions at `alphas` (rad): from the angle nearest to zero outwards both ways, each from its neighbour. */

@@ -92,10 +92,15 @@ function solveAtShape(layer: Layer, step: Step, i: number, stream: Stream, H: nu
 }
 
 function refreshRates(layer: Layer, stream: Stream, first: number, end: number): void {
-  const { kind, q, t, m, u, rates } = layer
-  for (let i = first; i < end; i++) {
-    stationRates(rates[i], kind[i] as LayerKind, stream, q[i], t[i], m[i] / u[i], u[i])
-  }
+  for (let i = first; i < end; i++) refreshStation(layer, i, stream)
+}
+
+/**
+ * Recomputes the rates of station i from its state. A first station may lie a little on the far side of the
+ * stagnation point, where its speed and mass defect are negative: its thicknesses are those of the near side.
+ */
+export function refreshStation({ kind, q, t, m, u, rates }: Layer, i: number, stream: Stream): void {
+  stationRates(rates[i], kind[i] as LayerKind, stream, q[i], t[i], m[i] / u[i], Math.abs(u[i]))
 }
 
 /** Without a former state the law is centred on a displacement thickness that stays as it is. */

@@ -159,7 +159,7 @@ function startStep(
   const start = NEAR_STAGNATION * u
   const part = (u - start) / (u - u1)
   atLaminar.set(layer.rates[0])
-  atLaminar[LOG_SPEED] += log(start / u1)
+  atLaminar[LOG_SPEED] += log(start / Math.abs(u1))
   atLaminar[LOG_SPEED + 4] = 1 / start
   intervalBalance(step.balance, slopes, LAMINAR, atLaminar, here, 0, t1, start, 0, t, u, part * dx)
   for (let row = 0; row < 2 * SLOPES; row += SLOPES) {
