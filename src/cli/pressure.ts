@@ -56,6 +56,8 @@ function readOperating(alpha: string | undefined, lift: string | undefined): Ope
 }
 
 function report(name: string, result: PressureResult, complain: (line: string) => void): number {
-  if (result.reason !== '') complain(`${name}: ${result.reason}`)
-  return result.converged ? STATUS.done : STATUS.marked
+  const { converged, reason } = result
+  if (!converged) complain(`${name}: not converged, no rows: ${reason}`)
+  else if (reason !== '') complain(`${name}: ${reason}`)
+  return converged ? STATUS.done : STATUS.marked
 }
