@@ -1,5 +1,7 @@
 import { copyLayers, withLaws, type ViscousSetting } from '../flow/couplingState'
-import { coldLayers, solveAtAngle, type ViscousSection, type ViscousSolution } from '../flow/interaction'
+import { solveAtAngle, type ViscousSolution } from '../flow/interaction'
+import { coldLayers } from '../flow/remarch'
+import type { ViscousSection } from '../flow/viscousSection'
 
 /**
  * Solutions of a section at many angles, each found in a way that does not depend on which was solved before.

@@ -1,6 +1,7 @@
 import { checkMach } from '../flow/compressibility'
 import type { ViscousSetting } from '../flow/couplingState'
-import { prepareViscous, type ViscousSection, type ViscousSolution } from '../flow/interaction'
+import type { ViscousSolution } from '../flow/interaction'
+import { prepareViscous, type ViscousSection } from '../flow/viscousSection'
 import { alphaForLift } from '../flow/panelLoads'
 import { sideLayer } from '../flow/surfaceLayers'
 import { viscousLoads } from '../flow/viscousLoads'
