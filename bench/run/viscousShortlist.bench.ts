@@ -1,3 +1,4 @@
+import { setMaxListeners } from 'node:events'
 import { availableParallelism } from 'node:os'
 import { resolve } from 'node:path'
 import { pathToFileURL } from 'node:url'
@@ -20,15 +21,13 @@ export function viscousShortlist(): Measured {
       return { kind: 'polar', section, state, alphas: POLAR_ALPHAS }
     }),
   ).map((task) => ({ key: taskKey(task), task }))
+  const { signal } = new AbortController()
+  setMaxListeners(0, signal)
   return {
     run: () =>
-      runTasks(
-        tasks,
-        { pool: threads.pool, store: memoryStore(0), signal: new AbortController().signal },
-        (_, result) => {
-          if (result.kind === 'failed') throw new Error(result.reason)
-        },
-      ),
+      runTasks(tasks, { pool: threads.pool, store: memoryStore(0), signal }, (_, result) => {
+        if (result.kind === 'failed') throw new Error(result.reason)
+      }),
     stop: threads.close,
     note: `all cores (${availableParallelism()} threads): 30 polars of 31 points; nothing cached`,
   }

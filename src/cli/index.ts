@@ -1,3 +1,4 @@
+import { setMaxListeners } from 'node:events'
 import { BadInput } from '../core'
 import { FileProblem } from '../io/problem'
 import { Failure, STATUS } from './failure'
@@ -70,6 +71,8 @@ function statusOf(error: unknown, name: string, terminal: Terminal): number {
 }
 
 const interrupt = new AbortController()
+// Every task that waits listens for Ctrl-C; that many listeners are no leak.
+setMaxListeners(0, interrupt.signal)
 process.once('SIGINT', () => interrupt.abort())
 
 // A reader that has gone is met where the text is written; here it must only not end the program.

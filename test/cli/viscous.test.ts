@@ -110,6 +110,15 @@ describe('sweep with boundary layers', () => {
     expect(rowsOf(alone.out)).toEqual(rowsOf(first.out).slice(6))
   })
 
+  it('says nothing of its own work, however many polars wait for a worker', async () => {
+    const many = Array.from({ length: 14 }, (_, i) => ['--reynolds', String(1e6 + 1e5 * i)]).flat()
+    const { status, out, err } = await here([
+      ...['sweep', 'naca:0012', '--alpha', '0:0:1', '--panels', '60', ...many],
+    ])
+    expect([status, err]).toEqual([0, ''])
+    expect(rowsOf(out)).toHaveLength(14)
+  })
+
   it('writes nothing and ends busy workers with 130 when it is interrupted', async () => {
     const before = await readdir(folder())
     const args = ['sweep', 'naca:2412', 'naca:4412', '--alpha', '-8:12:0.01', '--reynolds', '1e6']
