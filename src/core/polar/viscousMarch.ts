@@ -63,7 +63,7 @@ function release(
     if (!there.converged) continue
     const freeThere = letFree(section, setting, there)
     if (!freeThere.converged) continue
-    const back = solveAtAngle(section, setting, copyLayers(freeThere.layers), guarded.alpha)
+    const back = solveAtAngle(section, setting, copyLayers(freeThere.layers), guarded.alpha, { fresh: true })
     if (back.converged) return back
   }
   const cold = solveAtAngle(section, setting, coldLayers(section, guarded.alpha, setting), guarded.alpha)
@@ -75,7 +75,10 @@ function letFree(
   setting: ViscousSetting,
   { alpha, layers }: ViscousSolution,
 ): ViscousSolution {
-  return solveAtAngle(section, setting, withLaws(section.flow, copyLayers(layers), setting), alpha)
+  // Near a fold the way there decides the branch: it must not depend on what was solved before.
+  return solveAtAngle(section, setting, withLaws(section.flow, copyLayers(layers), setting), alpha, {
+    fresh: true,
+  })
 }
 
 function guardedSetting(setting: ViscousSetting, guard: number): ViscousSetting {
