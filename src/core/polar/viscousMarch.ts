@@ -115,7 +115,7 @@ export function solveSweep(
   section: ViscousSection,
   setting: ViscousSetting,
   alphas: readonly number[],
-  visit: (index: number, solution: ViscousSolution) => void,
+  visit: (index: number, point: MarchedPoint) => void,
 ): void {
   const order = alphas.map((_, i) => i).sort((i, j) => alphas[i] - alphas[j])
   const start = order.reduce(
@@ -126,8 +126,9 @@ export function solveSweep(
   for (const direction of [1, -1]) {
     let neighbour = first
     for (let k = direction === 1 ? start : start - 1; k >= 0 && k < order.length; k += direction) {
-      const { solution, guarded } = solvePoint(section, setting, alphas[order[k]], neighbour)
-      visit(order[k], solution)
+      const point = solvePoint(section, setting, alphas[order[k]], neighbour)
+      const { guarded } = point
+      visit(order[k], point)
       if (guarded.converged) neighbour = guarded
       if (k === start && guarded.converged) first = guarded
     }
