@@ -12,7 +12,8 @@ import {
   type Stream,
 } from './boundaryLayer/stationRates'
 import { STARTING_SHEAR_SHARE } from './boundaryLayer/turbulentClosure'
-import { WAKE_STATIONS, type DisplacementAnswer } from './displacement'
+import type { DisplacementAnswer } from './displacement'
+import { WAKE_STATIONS } from './wake'
 import type { PanelFlow } from './vortexPanels'
 
 /** What a coupled solution is asked for, besides the angle. */

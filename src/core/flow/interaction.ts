@@ -29,24 +29,27 @@ const PATIENCE = 5
 const SMALL_STEP = 0.1
 /** A linear system is used again as long as a step with it leaves less than this share of the residual. */
 const GOOD_STEP = 0.3
+/** Intervals by which a transition may have moved for that; 1 takes 6 % longer, 0 25 %. */
+const NEAR = 2
 
 /**
  * Solves layers, wake and potential flow together by Newton's method from `start` (used up) at a fixed angle
  * (rad). The unknowns are the mass defects; everything else of the layers answers to them (couplingSystem).
  * Between steps the layers are marched anew with a local interaction law, so that what is left is the
  * difference between the edge speeds of the layers and those of the potential flow. A factored system serves
- * as long as it brings the residual down and the transition stays in its interval, also from one angle to
- * the next. Bounded: at most 40 steps.
+ * as long as it brings the residual down and the transition stays near, also from one angle to
+ * the next unless the start is to be `fresh`. Bounded: at most 40 steps.
  */
 export function solveAtAngle(
   section: ViscousSection,
   setting: ViscousSetting,
   start: Layers,
   alpha: number,
-  tolerance = CONVERGED,
+  { tolerance = CONVERGED, fresh = false }: { readonly tolerance?: number; readonly fresh?: boolean } = {},
 ): ViscousSolution {
   const answer = answerAt(section, alpha)
   const system = systemFor(section, `${setting.tripUpper} ${setting.tripLower}`)
+  if (fresh) system.factors = null
   const change = new Float64Array(answer.size)
   let layers = start
   let [residual, best, last, idle, released] = [Infinity, Infinity, Infinity, 0, false]
@@ -107,13 +110,13 @@ function speedDifferences(
   return greatest
 }
 
-/** Whether a system was made for the same stagnation interval and transition intervals. */
+/** Whether a system was made for the same stagnation interval and for transition near where it is. */
 function holdsFor({ factors, stagnation, upper, lower }: LinearSystem, layers: Layers): boolean {
   return (
     factors !== null &&
     stagnation === layers.stagnation &&
-    upper === layers.upper.transition.at &&
-    lower === layers.lower.transition.at
+    Math.abs(upper - layers.upper.transition.at) <= NEAR &&
+    Math.abs(lower - layers.lower.transition.at) <= NEAR
   )
 }
 

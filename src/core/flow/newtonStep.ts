@@ -1,7 +1,7 @@
 import type { Layer } from './boundaryLayer/layer'
 import { LAMINAR } from './boundaryLayer/stationRates'
 import type { Layers } from './couplingState'
-import type { Answers } from './couplingSystem'
+import type { Answers } from './couplingRows'
 
 /** Greatest relative changes that a full step may make. */
 const GREATEST_RELATIVE = 0.6

@@ -1,15 +1,10 @@
 import type { Factors } from '../numerics/denseSolve'
 import { newStep, type Step } from './boundaryLayer/stationStep'
 import { arcLength } from './couplingState'
-import { newAnswers, type Answers } from './couplingSystem'
-import {
-  displacementAnswer,
-  surfaceAnswer,
-  traceWake,
-  WAKE_STATIONS,
-  type DisplacementAnswer,
-  type SurfaceAnswer,
-} from './displacement'
+import { newAnswers, type Answers } from './couplingRows'
+import { displacementAnswer, type DisplacementAnswer } from './displacement'
+import { surfaceAnswer, type SurfaceAnswer } from './surfaceAnswer'
+import { traceWake, WAKE_STATIONS } from './wake'
 import type { PanelFlow } from './vortexPanels'
 
 /** A section made ready for viscous solutions; answers for wakes are kept as they are made. */

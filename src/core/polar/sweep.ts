@@ -7,7 +7,8 @@ import { placePanels } from '../shape/panels'
 import type { Section } from '../shape/section'
 import { NO_LIMITS, type Polar, type PolarPoint } from './polar'
 import type { Operating, PressureResult, SectionState } from './state'
-import { viscousPressure, viscousSweep } from './viscousSweep'
+import { viscousPressure } from './viscousPressure'
+import { viscousSweep } from './viscousSweep'
 
 /** Fields that a method without a boundary layer leaves empty. */
 const NO_BOUNDARY_LAYER = { dragCoefficient: null, transitionUpper: null, transitionLower: null } as const

@@ -63,7 +63,7 @@ function release(
     if (!there.converged) continue
     const freeThere = letFree(section, setting, there)
     if (!freeThere.converged) continue
-    const back = solveAtAngle(section, setting, copyLayers(freeThere.layers), guarded.alpha)
+    const back = solveAtAngle(section, setting, copyLayers(freeThere.layers), guarded.alpha, { fresh: true })
     if (back.converged) return back
   }
   const cold = solveAtAngle(section, setting, coldLayers(section, guarded.alpha, setting), guarded.alpha)
@@ -75,7 +75,10 @@ function letFree(
   setting: ViscousSetting,
   { alpha, layers }: ViscousSolution,
 ): ViscousSolution {
-  return solveAtAngle(section, setting, withLaws(section.flow, copyLayers(layers), setting), alpha)
+  // Near a fold the way there decides the branch: it must not depend on what was solved before.
+  return solveAtAngle(section, setting, withLaws(section.flow, copyLayers(layers), setting), alpha, {
+    fresh: true,
+  })
 }
 
 function guardedSetting(setting: ViscousSetting, guard: number): ViscousSetting {
@@ -112,7 +115,7 @@ export function solveSweep(
   section: ViscousSection,
   setting: ViscousSetting,
   alphas: readonly number[],
-  visit: (index: number, solution: ViscousSolution) => void,
+  visit: (index: number, point: MarchedPoint) => void,
 ): void {
   const order = alphas.map((_, i) => i).sort((i, j) => alphas[i] - alphas[j])
   const start = order.reduce(
@@ -123,8 +126,9 @@ export function solveSweep(
   for (const direction of [1, -1]) {
     let neighbour = first
     for (let k = direction === 1 ? start : start - 1; k >= 0 && k < order.length; k += direction) {
-      const { solution, guarded } = solvePoint(section, setting, alphas[order[k]], neighbour)
-      visit(order[k], solution)
+      const point = solvePoint(section, setting, alphas[order[k]], neighbour)
+      const { guarded } = point
+      visit(order[k], point)
       if (guarded.converged) neighbour = guarded
       if (k === start && guarded.converged) first = guarded
     }
