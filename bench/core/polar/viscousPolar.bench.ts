@@ -1,12 +1,15 @@
 import { viscousSweep } from '../../../src/core/polar/viscousSweep'
 import { solvePoint, solveSweep } from '../../../src/core/polar/viscousMarch'
 import { copyLayers, type ViscousSetting } from '../../../src/core/flow/couplingState'
-import { linearise, newAnswers } from '../../../src/core/flow/couplingSystem'
-import { displacementAnswer, surfaceAnswer, traceWake } from '../../../src/core/flow/displacement'
+import { newAnswers } from '../../../src/core/flow/couplingRows'
+import { linearise } from '../../../src/core/flow/couplingSystem'
+import { displacementAnswer } from '../../../src/core/flow/displacement'
 import { coldLayers, remarch } from '../../../src/core/flow/remarch'
+import { surfaceAnswer } from '../../../src/core/flow/surfaceAnswer'
 import { viscousLoads } from '../../../src/core/flow/viscousLoads'
 import { answerAt, prepareViscous, type ViscousSection } from '../../../src/core/flow/viscousSection'
 import { solvePanels } from '../../../src/core/flow/vortexPanels'
+import { traceWake } from '../../../src/core/flow/wake'
 import { factorInPlace, solveInPlace } from '../../../src/core/numerics/denseSolve'
 import { nacaSection } from '../../../src/core/shape/naca'
 import { placePanels } from '../../../src/core/shape/panels'
@@ -70,7 +73,7 @@ export function viscousPolar(reynolds: number): Measured {
 /** How many points of the polar converge, and how many steps the last solve of each takes. */
 function stepsOf(ready: ViscousSection, setting: ViscousSetting): string {
   let [solved, steps] = [0, 0]
-  solveSweep(ready, setting, POLAR_ALPHAS, (_, solution) => {
+  solveSweep(ready, setting, POLAR_ALPHAS, (_, { solution }) => {
     if (!solution.converged) return
     solved++
     steps += solution.iterations
