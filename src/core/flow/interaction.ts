@@ -25,6 +25,8 @@ export const CONVERGED = 1e-5
 const MOST_ITERATIONS = 40
 /** Steps without progress after which they are shortened. */
 const PATIENCE = 5
+/** Steps without progress after which there will be none. */
+const HOPELESS = 16
 /** Relative change below which a step is small: layers may then be as steep as they like. */
 const SMALL_STEP = 0.1
 /** A linear system is used again as long as a step with it leaves less than this share of the residual. */
@@ -53,7 +55,8 @@ export function solveAtAngle(
   const change = new Float64Array(answer.size)
   let layers = start
   let [residual, best, last, idle, released] = [Infinity, Infinity, Infinity, 0, false]
-  for (let n = 0; n < MOST_ITERATIONS; n++) {
+  let n = 0
+  for (; n < MOST_ITERATIONS; n++) {
     const sound = remarch(section, layers, answer, setting, true, released ? Infinity : STEEPEST)
     const before = residual
     residual = speedDifferences(layers, answer, alpha, change)
@@ -68,6 +71,7 @@ export function solveAtAngle(
     idle = residual < 0.7 * best ? 0 : idle + 1
     best = Math.min(best, residual)
     if (last < SMALL_STEP && idle >= 2) released = true
+    if (idle > HOPELESS) break
     const serves = sound && holdsFor(system, layers) && (n === 0 || residual < GOOD_STEP * before)
     if (!serves) {
       if (sound) linearise(system.rows, layers, section.step, setting.stream, gapOf(section, layers))
@@ -83,7 +87,7 @@ export function solveAtAngle(
     clearConstants(system)
     layers = placeStagnation(section, setting, layers)
   }
-  return { alpha, layers, answer, converged: false, residual, iterations: MOST_ITERATIONS }
+  return { alpha, layers, answer, converged: false, residual, iterations: n }
 }
 
 /** Length of the interval that holds the stagnation point, chords. */

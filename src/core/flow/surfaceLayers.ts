@@ -66,7 +66,7 @@ export function sideEvents(flow: PanelFlow, layers: Layers, side: number): SideE
     return p + share * (g - p)
   }
   const { at, share } = layer.transition
-  const transition = at >= layer.count ? 1 : Math.min(between(Math.max(at, 1), share), 1)
+  const transition = at >= layer.count ? 1 : Math.max(0, Math.min(between(Math.max(at, 1), share), 1))
   let [laminarSeparation, reattachment, turbulentSeparation]: (number | null)[] = [null, null, null]
   for (let i = 1; i < layer.count; i++) {
     const before = layer.rates[i - 1][FRICTION]

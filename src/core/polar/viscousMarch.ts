@@ -17,7 +17,7 @@ const GUARD = 0.95
 /** Angles aside from which a branch is followed back, rad. */
 const ASIDE = [-1, 1, -2, 2].map((degrees) => (degrees * Math.PI) / 180)
 /** Halvings of the step of the angle when a point is approached from a solved neighbour. */
-const MOST_HALVINGS = 4
+const MOST_HALVINGS = 3
 
 /** A point of a march: its solution, and the guarded one from which neighbours start. */
 export interface MarchedPoint {

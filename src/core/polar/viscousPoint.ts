@@ -1,6 +1,6 @@
 import type { ViscousSetting } from '../flow/couplingState'
 import type { ViscousSolution } from '../flow/interaction'
-import { viscousLoads } from '../flow/viscousLoads'
+import { viscousLoads, type ViscousLoads } from '../flow/viscousLoads'
 import type { ViscousSection } from '../flow/viscousSection'
 import type { PolarPoint } from './polar'
 
@@ -27,6 +27,20 @@ export function pointOf(
 ): PolarPoint {
   if (!solution.converged) return emptyPoint(alpha, failureOf(solution))
   const loads = viscousLoads(flow, solution, setting.stream)
+  return {
+    alpha,
+    liftCoefficient: loads.liftCoefficient,
+    dragCoefficient: loads.dragCoefficient,
+    momentCoefficient: loads.momentCoefficient,
+    transitionUpper: loads.upper.transition,
+    transitionLower: loads.lower.transition,
+    converged: true,
+    reason: marksOf(loads, setting),
+  }
+}
+
+/** What deserves a mark at a solution, as one line; empty when nothing does. */
+export function marksOf(loads: ViscousLoads, setting: ViscousSetting): string {
   const notes: string[] = []
   if (loads.sonic) notes.push('the flow turns sonic on the surface')
   const sides = [
@@ -38,16 +52,7 @@ export function pointOf(
       notes.push(`transition on the ${side} side is forced behind laminar separation`)
     }
   }
-  return {
-    alpha,
-    liftCoefficient: loads.liftCoefficient,
-    dragCoefficient: loads.dragCoefficient,
-    momentCoefficient: loads.momentCoefficient,
-    transitionUpper: loads.upper.transition,
-    transitionLower: loads.lower.transition,
-    converged: true,
-    reason: notes.join('; '),
-  }
+  return notes.join('; ')
 }
 
 /** Why a solution counts as not converged. */

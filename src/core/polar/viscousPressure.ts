@@ -8,7 +8,7 @@ import { BadInput } from '../numerics/errors'
 import type { Section } from '../shape/section'
 import type { Operating, PressureResult, SectionState } from './state'
 import { solvePoint, type MarchedPoint } from './viscousMarch'
-import { failureOf } from './viscousPoint'
+import { failureOf, marksOf } from './viscousPoint'
 import { NO_PANELS, readySection, settingOf } from './viscousState'
 
 /** Steps and tolerance of the search for a lift coefficient. */
@@ -71,7 +71,7 @@ function pressureOf(
       pressureDrag: loads.pressureDrag,
     },
     converged: true,
-    reason: loads.sonic ? 'the flow turns sonic on the surface' : '',
+    reason: marksOf(loads, setting),
   }
 }
 
