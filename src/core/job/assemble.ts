@@ -14,18 +14,8 @@ import type {
   SectionFacts,
 } from './comparison'
 import type { Condition, Job, JobEntry } from './job'
-import {
-  follow,
-  pressureTask,
-  rootPolar,
-  sectionAtStation,
-  stationOf,
-  stationReynolds,
-  whyNotComputed,
-  wingOf,
-  type Known,
-  type Planned,
-} from './plan'
+import { follow, rootPolar, whyNotComputed, wingOf, type Known, type Planned } from './plan'
+import { pressureTask, sectionAtStation, stationOf, stationReynolds } from './shownStation'
 import { taskKey } from './taskKey'
 
 /** The comparison that any subset of the results allows. */
@@ -132,7 +122,7 @@ function paneOf(
 ): { pane: PaneState; waiting: boolean; note: string } {
   const stationY = stationOf(job)
   const reynolds = stationReynolds(job, wing)
-  const task = pressureTask(job, entry, condition, wing)
+  const task = pressureTask(job, entry, condition, planned, wing)
   const result = task === null ? undefined : known.get(taskKey(task))
   const pressure = result?.kind === 'pressure' ? result.pressure : null
   return {

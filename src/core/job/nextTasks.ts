@@ -1,5 +1,6 @@
 import type { Job } from './job'
-import { follow, pressureTask, whyNotComputed, wingOf, type Known } from './plan'
+import { follow, whyNotComputed, wingOf, type Known } from './plan'
+import { pressureTask } from './shownStation'
 import type { Task } from './task'
 import { taskKey } from './taskKey'
 
@@ -17,7 +18,7 @@ export function nextTasks(job: Job, known: Known): Task[] {
       const planned = follow(job, entry, condition, known)
       for (const task of planned.tasks) wanted.set(taskKey(task), task)
       const wing = wingOf(planned)
-      const pressure = wing === null ? null : pressureTask(job, entry, condition, wing)
+      const pressure = wing === null ? null : pressureTask(job, entry, condition, planned, wing)
       if (pressure !== null) wanted.set(taskKey(pressure), pressure)
     }
   }

@@ -3,13 +3,10 @@ import { liftLine, type SectionLine } from '../polar/liftLine'
 import { machBracket, polarBetween } from '../polar/machLattice'
 import type { Polar } from '../polar/polar'
 import { lineAt, polarAt } from '../polar/polarFamily'
-import { loft } from '../shape/loft'
-import type { Section } from '../shape/section'
-import { meanAerodynamicChord } from '../wing/planform'
 import { slowestStep } from '../wing/slowest'
-import { localLiftAt, wingAt, type WingAtCondition, type WingInput } from '../wing/wing'
+import { wingAt, type WingAtCondition, type WingInput } from '../wing/wing'
 import type { Condition, Job, JobEntry } from './job'
-import { flightOf, polarTasks, sectionState } from './polarNeeds'
+import { flightOf, polarTasks } from './polarNeeds'
 import type { Task, TaskResult } from './task'
 import { taskKey } from './taskKey'
 
@@ -146,38 +143,4 @@ export function rootPolar(
 /** The wing of a plan that came to its end. */
 export function wingOf(planned: Planned): WingAtCondition | null {
   return planned.input === null ? null : wingAt(planned.input)
-}
-
-/** Distance of the shown station from the centreline, m. */
-export function stationOf(job: Job): number {
-  return job.station ?? meanAerodynamicChord(job.wing.stations).y
-}
-
-/** Reynolds number at the reported station nearest to the shown one. */
-export function stationReynolds(job: Job, wing: WingAtCondition): number {
-  const y = stationOf(job)
-  return wing.stations.reduce((best, s) => (Math.abs(s.y - y) < Math.abs(best.y - y) ? s : best)).reynolds
-}
-
-/** The section of an entry at the shown station. */
-export function sectionAtStation(job: Job, entry: JobEntry): Section | null {
-  if (entry.root === null || entry.tip === null) return null
-  return loft(entry.root, entry.tip, (2 * stationOf(job)) / job.wing.span)
-}
-
-/** The task of the surface pressure at the shown station; null where the method gives none. */
-export function pressureTask(
-  job: Job,
-  entry: JobEntry,
-  condition: Condition,
-  wing: WingAtCondition,
-): Task | null {
-  const section = sectionAtStation(job, entry)
-  if (job.method === 'thin' || section === null || wing.mach > 0.5) return null
-  return {
-    kind: 'pressure',
-    section,
-    state: sectionState(job, entry, condition, { reynolds: stationReynolds(job, wing), mach: wing.mach }),
-    at: { lift: localLiftAt(wing, stationOf(job)) },
-  }
 }

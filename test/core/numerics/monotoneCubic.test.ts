@@ -7,7 +7,9 @@ function values(x: readonly number[], y: readonly number[]): number[] {
   return x
     .slice(0, -1)
     .flatMap((from, i) =>
-      Array.from({ length: 51 }, (_, k) => monotoneValue(x, y, slopes, i, from + (k / 50) * (x[i + 1] - from))),
+      Array.from({ length: 51 }, (_, k) =>
+        monotoneValue(x, y, slopes, i, from + (k / 50) * (x[i + 1] - from)),
+      ),
     )
 }
 
