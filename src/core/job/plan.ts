@@ -38,7 +38,7 @@ export interface Planned {
 const FIRST_LIFT = 1.2
 /** Relative change of the speed at which it stands; the wing's maximum lift is then met as closely. */
 const SAME_SPEED = 1e-10
-/** The map contracts about tenfold a step; far more steps than that mean it does not settle. */
+/** The map contracts about tenfold a step and faster by secants; far more steps mean it does not settle. */
 const MOST_STEPS = 60
 
 /**
@@ -48,6 +48,7 @@ const MOST_STEPS = 60
  */
 export function follow(job: Job, entry: JobEntry, condition: Condition, known: Known): Planned {
   const slowest = condition.speed === 'slowest'
+  let before: Tried | null = null
   let speed = slowest ? firstSpeed(job, condition) : (condition.speed as number)
   for (let step = 0; step < MOST_STEPS; step++) {
     const { tasks, input, fault } = ready(job, entry, condition, known, speed)
@@ -55,9 +56,27 @@ export function follow(job: Job, entry: JobEntry, condition: Condition, known: K
     const next = slowestStep(input)
     if (typeof next === 'string') return { tasks, speed: null, fault: next, input: null }
     if (Math.abs(next / speed - 1) < SAME_SPEED) return { tasks, speed, fault: '', input }
-    speed = next
+    const tried = { speed, next }
+    speed = nextTry(tried, before)
+    before = tried
   }
   return { tasks: [], speed: null, fault: 'the slowest speed does not settle', input: null }
+}
+
+/** A speed tried and what the step from it gave, m/s. */
+interface Tried {
+  readonly speed: number
+  readonly next: number
+}
+
+/** Growth of the step's result with the speed beyond which the straight line through two tries is not trusted. */
+const TRUSTED_GROWTH = 0.5
+
+/** Where the straight line through two tries stands still; without it, the step itself. */
+function nextTry({ speed, next }: Tried, before: Tried | null): number {
+  if (before === null) return next
+  const growth = (next - before.next) / (speed - before.speed)
+  return Math.abs(growth) < TRUSTED_GROWTH ? speed + (next - speed) / (1 - growth) : next
 }
 
 function firstSpeed(job: Job, condition: Condition): number {

@@ -5,7 +5,7 @@ import { linearLiftingLine, momentStrips, tipOf, type LinearWing } from './linea
 import { meanAerodynamicChord, stationAt } from './planform'
 import { tailLoadLine, wingMoment, type TailLoadLine } from './trim'
 import { lineOfStation, type WingSections } from './viscousStations'
-import type { WingInput } from './wing'
+import type { WingInput } from './wingInput'
 
 /** A wing at a speed before its lift is chosen: what the trim and the stall both need. */
 export interface PreparedWing {

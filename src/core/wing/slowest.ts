@@ -3,7 +3,7 @@ import { rootAngleForLift } from './liftingLine'
 import { stationStates } from './linearSections'
 import { prepareWing } from './preparedWing'
 import { stallStations } from './viscousFigures'
-import type { WingInput } from './wing'
+import type { WingInput } from './wingInput'
 
 /**
  * The speed (m/s) at which the wing carries its load with the greatest lift that it has at the Reynolds and

@@ -1,11 +1,9 @@
 import { power } from '../numerics/elementary'
-import { whyUnflyable, type FlightInput } from '../flight/conditions'
+import { whyUnflyable } from '../flight/conditions'
 import { BadInput } from '../numerics/errors'
-import type { SectionLine } from '../polar/liftLine'
 import { rootAngleForLift, wingLiftAt, wingLiftSlope } from './liftingLine'
 import { peakLift, stationStates } from './linearSections'
 import { performance } from './performance'
-import type { WingShape } from './planform'
 import { quickSlopes } from './quickFormulas'
 import {
   NO_STATION_FIGURES,
@@ -13,10 +11,11 @@ import {
   viscousFigures,
   type WingStationState,
 } from './viscousFigures'
-import type { WingFamilies } from './viscousStations'
 import { prepareWing } from './preparedWing'
+import type { WingInput } from './wingInput'
 import { wingNotes } from './wingNotes'
 
+export type { WingInput } from './wingInput'
 export type { WingStationState as StationState } from './viscousFigures'
 
 /** A wing at one condition; SI and radians. */
@@ -70,27 +69,6 @@ export interface WingAtCondition {
   readonly notes: readonly string[]
   /** Figures that the method gives but that are missing here, and why; they mark the condition. */
   readonly missing: readonly string[]
-}
-
-/** What a wing needs to be computed at a condition. */
-export interface WingInput {
-  readonly shape: WingShape
-  readonly aircraft: {
-    readonly tailArm: number | null
-    readonly centreOfGravity: number | null
-    /** Without a tail there is no tail load, whatever the arm. */
-    readonly tailless: boolean
-    /** Of everything but the wing, m2. */
-    readonly dragArea?: number
-  }
-  readonly condition: FlightInput
-  /** Section properties at the root and at the tip, linear in y between them. */
-  readonly root: SectionLine
-  readonly tip: SectionLine
-  /** A Reynolds number at the mean aerodynamic chord in place of that flown; null: as flown. */
-  readonly fixedReynolds: number | null
-  /** Viscous polars: each station then has the lift line, drag and stall of its own Reynolds number. */
-  readonly families?: WingFamilies
 }
 
 const SMALLEST_LIFT_FOR_EFFICIENCY = 0.05
