@@ -12,7 +12,7 @@ const DEGREE = Math.PI / 180
 export const POLAR_ALPHAS: readonly number[] = Array.from({ length: 65 }, (_, i) => (-12 + 0.5 * i) * DEGREE)
 
 /** x/c at which a dirty surface trips the flow. */
-export const DIRTY = { upper: 0.05, lower: 0.1 } as const
+const DIRTY = { upper: 0.05, lower: 0.1 } as const
 
 /** The state of flight of a condition at a speed (m/s). */
 export function flightOf(condition: Condition, speed: number): FlightInput {
