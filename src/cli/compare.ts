@@ -1,5 +1,5 @@
-import { rmdir } from 'node:fs/promises'
-import { join, resolve } from 'node:path'
+import { rmdir, stat } from 'node:fs/promises'
+import { dirname, join, resolve } from 'node:path'
 import { makeFolder } from '../files/makeFolder'
 import { plainReason } from '../files/plainReason'
 import { compareFiles } from '../io/csv'
@@ -31,8 +31,9 @@ export const compare: Command = {
     })
     const { out } = values
     if (out === undefined || out === '' || out === '-') throw new Failure('--out DIR is needed: a folder')
-    const { comparison, status } = await runBrief(positionals, values, null, terminal)
     const folder = resolve(terminal.folder, out)
+    await refuseFile(folder, out)
+    const { comparison, status } = await runBrief(positionals, values, null, terminal)
     const made = await makeOut(folder, out)
     try {
       const files = compareFiles(comparison)
@@ -46,6 +47,15 @@ export const compare: Command = {
     }
     return status
   },
+}
+
+/** Throws Failure before the long computation when a file stands in the place of the folder or above it. */
+async function refuseFile(folder: string, named: string): Promise<void> {
+  const found = await stat(folder).catch(() => null)
+  if (found !== null && !found.isDirectory()) {
+    throw new Failure(`the folder ${named} cannot be made: ${folder} - it is a file`)
+  }
+  if (found === null && dirname(folder) !== folder) await refuseFile(dirname(folder), named)
 }
 
 /** Makes the folder; whether it was not there before. */

@@ -1,5 +1,5 @@
 import Papa from 'papaparse'
-import type { Comparison, Polar, PressureResult } from '../core'
+import { toTheStalls, type Comparison, type Polar, type PressureResult } from '../core'
 
 /** A cell: text, number, truth, or empty for null. */
 type Cell = string | number | boolean | null
@@ -121,7 +121,7 @@ export function wingCsv(comparison: Comparison): string {
       (wing?.stations ?? []).map((station): Cell[] => [
         ...[entry.rootName, entry.tipName, comparison.conditions[i]!.name],
         ...[station.y, station.chord, degrees(station.twist), station.reynolds, station.liftCoefficient],
-        ...[null, degrees(station.inducedAngle), null],
+        ...[station.maxLiftCoefficient, degrees(station.inducedAngle), station.profileDragCoefficient],
       ]),
     ),
   )
@@ -131,7 +131,10 @@ export function wingCsv(comparison: Comparison): string {
 /** The files of a whole comparison, as `compare` writes them and the window exports them. */
 export function compareFiles(comparison: Comparison): { readonly name: string; readonly text: string }[] {
   const polars = comparison.entries.flatMap((entry) =>
-    entry.polars.map(({ at, polar }) => ({ section: at === 'root' ? entry.rootName : entry.tipName, polar })),
+    entry.polars.map(({ at, polar }) => ({
+      section: at === 'root' ? entry.rootName : entry.tipName,
+      polar: toTheStalls(polar),
+    })),
   )
   return [
     { name: 'polars.csv', text: polarCsv(polars) },

@@ -131,8 +131,8 @@ function jobEntry(entry: BriefEntry, names: Set<string>, readBytes: ReadBytes, w
     name,
     rootName: pair ? (entry.root ?? '?') : name,
     tipName: pair ? (entry.tip ?? '?') : name,
-    tripUpper: entry.trip_upper ?? 1,
-    tripLower: entry.trip_lower ?? 1,
+    tripUpper: entry.trip_upper,
+    tripLower: entry.trip_lower,
   }
   try {
     const [root, tip] = entrySections(entry, readBytes, (words) => warnings.push(`${name}: ${words}`))

@@ -14,16 +14,8 @@ import type {
   SectionFacts,
 } from './comparison'
 import type { Condition, Job, JobEntry } from './job'
-import {
-  polarAt,
-  polarTasks,
-  pressureTask,
-  sectionAtStation,
-  stationOf,
-  whyNotComputed,
-  wingOf,
-  type Known,
-} from './plan'
+import { follow, rootPolar, whyNotComputed, wingOf, type Known, type Planned } from './plan'
+import { pressureTask, sectionAtStation, stationOf, stationReynolds } from './shownStation'
 import { taskKey } from './taskKey'
 
 /** The comparison that any subset of the results allows. */
@@ -39,6 +31,11 @@ export function assemble(job: Job, known: Known): Comparison {
 }
 
 function comparedEntry(job: Job, entry: JobEntry, known: Known): ComparedEntry {
+  const plans = job.conditions.map((condition) =>
+    entry.fault !== null || whyNotComputed(job, condition) !== null
+      ? null
+      : follow(job, entry, condition, known),
+  )
   const root = entry.root === null ? null : factsOf(entry.root, job.wing.sparAt)
   return {
     name: entry.name,
@@ -47,8 +44,8 @@ function comparedEntry(job: Job, entry: JobEntry, known: Known): ComparedEntry {
     fault: entry.fault,
     root,
     tip: entry.tip === entry.root || entry.tip === null ? root : factsOf(entry.tip, job.wing.sparAt),
-    polars: usedPolars(job, entry, known),
-    conditions: job.conditions.map((condition) => atCondition(job, entry, condition, known)),
+    polars: usedPolars(entry, plans, known),
+    conditions: job.conditions.map((condition, i) => atCondition(job, entry, condition, plans[i], known)),
   }
 }
 
@@ -69,19 +66,13 @@ function factsOf(section: Section, sparAt: number): SectionFacts {
   return { ...facts, depthAtSpar: depthAt(section, sparAt) }
 }
 
-function usedPolars(job: Job, entry: JobEntry, known: Known): EntryPolar[] {
-  if (entry.root === null || entry.tip === null) return []
+/** Polars on which the entry's conditions rest. */
+function usedPolars(entry: JobEntry, plans: readonly (Planned | null)[], known: Known): EntryPolar[] {
   const used = new Map<string, EntryPolar>()
-  for (const [at, section] of Object.entries({ root: entry.root, tip: entry.tip })) {
-    if (at === 'tip' && entry.tip === entry.root) continue
-    for (const condition of job.conditions) {
-      if (whyNotComputed(condition) !== null) continue
-      for (const task of polarTasks(job, entry, section, condition)) {
-        const result = known.get(taskKey(task))
-        if (result?.kind !== 'polar') continue
-        used.set(`${at} ${taskKey(task)}`, { at: at === 'root' ? 'root' : 'tip', polar: result.polar })
-      }
-    }
+  for (const task of plans.flatMap((planned) => planned?.tasks ?? [])) {
+    const result = known.get(taskKey(task))
+    if (result?.kind !== 'polar') continue
+    used.set(taskKey(task), { at: task.section === entry.root ? 'root' : 'tip', polar: result.polar })
   }
   return [...used.values()].sort((a, b) =>
     a.at === b.at ? byState(a.polar, b.polar) : a.at === 'root' ? -1 : 1,
@@ -98,47 +89,51 @@ function byState(a: Polar, b: Polar): number {
   )
 }
 
-function atCondition(job: Job, entry: JobEntry, condition: Condition, known: Known): EntryAtCondition {
+function atCondition(
+  job: Job,
+  entry: JobEntry,
+  condition: Condition,
+  planned: Planned | null,
+  known: Known,
+): EntryAtCondition {
   const marked = (note: string): EntryAtCondition => ({
     status: 'marked',
     wing: null,
     notes: [note],
     pane: null,
   })
-  if (entry.fault !== null) return marked(entry.fault)
-  const reason = whyNotComputed(condition)
-  if (reason !== null) return marked(reason)
-  const wing = wingOf(job, entry, condition, known)
+  if (planned === null) return marked(entry.fault ?? whyNotComputed(job, condition) ?? '')
+  if (planned.fault !== '') return marked(planned.fault)
+  const wing = wingOf(planned)
   if (wing === null) return { status: 'waiting', wing: null, notes: [], pane: null }
-  if (typeof wing === 'string') return marked(wing)
-  const { pane, waiting, note } = paneOf(job, entry, condition, wing, known)
-  const notes = note === '' ? wing.notes : [...wing.notes, note]
-  return { status: waiting ? 'waiting' : 'known', wing, notes, pane }
+  const { pane, waiting, note } = paneOf(job, entry, condition, planned, wing, known)
+  const notes = [...wing.missing, ...wing.notes, note].filter((words) => words !== '')
+  const status = waiting ? 'waiting' : wing.missing.length > 0 ? 'marked' : 'known'
+  return { status, wing, notes, pane }
 }
 
 function paneOf(
   job: Job,
   entry: JobEntry,
   condition: Condition,
+  planned: Planned,
   wing: WingAtCondition,
   known: Known,
 ): { pane: PaneState; waiting: boolean; note: string } {
   const stationY = stationOf(job)
-  const task = pressureTask(job, entry, condition, wing)
+  const reynolds = stationReynolds(job, wing)
+  const task = pressureTask(job, entry, condition, planned, wing)
   const result = task === null ? undefined : known.get(taskKey(task))
   const pressure = result?.kind === 'pressure' ? result.pressure : null
-  const polar = entry.root === null ? null : polarAt(job, entry, entry.root, condition, known)
   return {
     pane: {
       stationY,
       section: sectionAtStation(job, entry),
       liftCoefficient: localLiftAt(wing, stationY),
-      reynolds: wing.stations.reduce((best, s) =>
-        Math.abs(s.y - stationY) < Math.abs(best.y - stationY) ? s : best,
-      ).reynolds,
+      reynolds,
       mach: wing.mach,
-      surface: condition.surface,
-      polar: polar === null || typeof polar === 'string' ? null : polar,
+      surface: task?.state.surface ?? condition.surface,
+      polar: rootPolar(job, entry, planned.tasks, known, { reynolds, mach: wing.mach }),
       pressure,
     },
     waiting: task !== null && result === undefined,

@@ -46,8 +46,9 @@ export interface JobEntry {
   readonly tipName: string
   readonly root: Section | null
   readonly tip: Section | null
-  readonly tripUpper: number
-  readonly tripLower: number
+  /** x/c of forced transition, 1: none; null: as the condition's surface says. */
+  readonly tripUpper: number | null
+  readonly tripLower: number | null
   readonly fault: string | null
 }
 

@@ -1,24 +1,24 @@
 import type { Job } from './job'
-import { polarTasks, pressureTask, whyNotComputed, wingOf, type Known } from './plan'
+import { follow, whyNotComputed, wingOf, type Known } from './plan'
+import { pressureTask } from './shownStation'
 import type { Task } from './task'
 import { taskKey } from './taskKey'
 
 /**
  * The tasks that a job still needs, given what is known, each once. Asked again after results arrive,
- * since pressures depend on the wing and the wing on its polars; none are left when the job is done.
+ * since the slowest speed depends on the polars, pressures on the wing and the wing on its polars; none are
+ * left when the job is done.
  */
 export function nextTasks(job: Job, known: Known): Task[] {
   const wanted = new Map<string, Task>()
   for (const entry of job.entries) {
     if (entry.fault !== null || entry.root === null || entry.tip === null) continue
     for (const condition of job.conditions) {
-      if (whyNotComputed(condition) !== null) continue
-      for (const section of new Set([entry.root, entry.tip])) {
-        for (const task of polarTasks(job, entry, section, condition)) wanted.set(taskKey(task), task)
-      }
-      const wing = wingOf(job, entry, condition, known)
-      if (wing === null || typeof wing === 'string') continue
-      const pressure = pressureTask(job, entry, condition, wing)
+      if (whyNotComputed(job, condition) !== null) continue
+      const planned = follow(job, entry, condition, known)
+      for (const task of planned.tasks) wanted.set(taskKey(task), task)
+      const wing = wingOf(planned)
+      const pressure = wing === null ? null : pressureTask(job, entry, condition, planned, wing)
       if (pressure !== null) wanted.set(taskKey(pressure), pressure)
     }
   }

@@ -1,132 +1,165 @@
-import { flightState, whyUnflyable, type FlightInput } from '../flight/conditions'
+import { flightState, whyUnflyable } from '../flight/conditions'
 import { liftLine, type SectionLine } from '../polar/liftLine'
 import { machBracket, polarBetween } from '../polar/machLattice'
 import type { Polar } from '../polar/polar'
-import type { SectionState } from '../polar/state'
-import { loft } from '../shape/loft'
-import type { Section } from '../shape/section'
-import { meanAerodynamicChord } from '../wing/planform'
-import { localLiftAt, wingAt, type WingAtCondition } from '../wing/wing'
+import { lineAt, polarAt } from '../polar/polarFamily'
+import { slowestStep } from '../wing/slowest'
+import { wingAt, type WingAtCondition, type WingInput } from '../wing/wing'
 import type { Condition, Job, JobEntry } from './job'
+import { flightOf, polarTasks } from './polarNeeds'
 import type { Task, TaskResult } from './task'
 import { taskKey } from './taskKey'
 
 /** Results by the names of their tasks. */
 export type Known = ReadonlyMap<string, TaskResult>
 
-const DEGREE = Math.PI / 180
-/** Angles of every polar of a brief: -12 to 20 deg by half a degree. */
-export const POLAR_ALPHAS: readonly number[] = Array.from({ length: 65 }, (_, i) => (-12 + 0.5 * i) * DEGREE)
-
 /** Why a condition gives no figures with this method; null when it does. */
-export function whyNotComputed(condition: Condition): string | null {
-  if (condition.speed === 'slowest') {
+export function whyNotComputed(job: Job, condition: Condition): string | null {
+  if (condition.speed === 'slowest' && job.method !== 'viscous') {
     return 'the slowest speed needs the viscous method: without a boundary layer no section stalls'
   }
   if (condition.flap !== 0) return 'a deflected flap is not computed by this method'
-  return whyUnflyable({ ...condition, speed: condition.speed })
+  return whyUnflyable({ ...condition, speed: condition.speed === 'slowest' ? 1 : condition.speed })
 }
 
-/** The state of flight of a condition whose speed is given. */
-export function flightOf(condition: Condition, speed: number): FlightInput {
-  const { altitude, isaOffset, loadFactor, mass } = condition
-  return { speed, altitude, isaOffset, loadFactor, mass }
+/** One entry at one condition, as far as it can be followed with what is known. */
+export interface Planned {
+  /** Polars that it needs, root first; those of the speed last tried. */
+  readonly tasks: readonly Task[]
+  /** m/s; null while polars are missing or when there is no such speed. */
+  readonly speed: number | null
+  /** Why there is no wing; empty when there is, or when it waits. */
+  readonly fault: string
+  /** Null without a speed. */
+  readonly input: WingInput | null
 }
 
-/** The state at which an entry's section is computed at a Mach number of the lattice. */
-function sectionState(job: Job, entry: JobEntry, condition: Condition, mach: number): SectionState {
-  const { tripUpper, tripLower } = entry
-  return {
-    ...{ method: job.method, reynolds: null, mach, surface: condition.surface, amplification: null },
-    ...{ tripUpper, tripLower, flap: condition.flap, panels: job.panels },
+/** Wing C_L of the first guess of the slowest speed; it moves only how many rounds of polars follow. */
+const FIRST_LIFT = 1.2
+/** Relative change of the speed at which it stands; the wing's maximum lift is then met as closely. */
+const SAME_SPEED = 1e-10
+/** The map contracts about tenfold a step and faster by secants; far more steps mean it does not settle. */
+const MOST_STEPS = 60
+
+/**
+ * Follows one entry at one condition: at a given speed to its polars and its wing, at the slowest speed
+ * from the first guess over the polars of each speed tried to the one that stays. Depends on the results
+ * alone, so that asked again it takes the same way and comes further.
+ */
+export function follow(job: Job, entry: JobEntry, condition: Condition, known: Known): Planned {
+  const slowest = condition.speed === 'slowest'
+  let before: Tried | null = null
+  let speed = slowest ? firstSpeed(job, condition) : (condition.speed as number)
+  for (let step = 0; step < MOST_STEPS; step++) {
+    const { tasks, input, fault } = ready(job, entry, condition, known, speed)
+    if (input === null || !slowest) return { tasks, speed: input === null ? null : speed, fault, input }
+    const next = slowestStep(input)
+    if (typeof next === 'string') return { tasks, speed: null, fault: next, input: null }
+    if (Math.abs(next / speed - 1) < SAME_SPEED) return { tasks, speed, fault: '', input }
+    const tried = { speed, next }
+    speed = nextTry(tried, before)
+    before = tried
   }
+  return { tasks: [], speed: null, fault: 'the slowest speed does not settle', input: null }
 }
 
-/** The tasks of the polars that one section of an entry needs at a condition: one or two Mach numbers. */
-export function polarTasks(job: Job, entry: JobEntry, section: Section, condition: Condition): Task[] {
-  const { low, high } = machBracket(job.method, machOf(job, condition))
-  return [...new Set([low, high])].map((mach) => ({
-    kind: 'polar',
-    section,
-    state: sectionState(job, entry, condition, mach),
-    alphas: POLAR_ALPHAS,
-  }))
+/** A speed tried and what the step from it gave, m/s. */
+interface Tried {
+  readonly speed: number
+  readonly next: number
 }
 
-function machOf(job: Job, condition: Condition): number {
-  if (condition.speed === 'slowest') return 0
-  return condition.speed / flightState(job.wing.area, flightOf(condition, condition.speed)).air.speedOfSound
+/** Growth of the step's result with the speed beyond which the straight line through two tries is not trusted. */
+const TRUSTED_GROWTH = 0.5
+
+/** Where the straight line through two tries stands still; without it, the step itself. */
+function nextTry({ speed, next }: Tried, before: Tried | null): number {
+  if (before === null) return next
+  const growth = (next - before.next) / (speed - before.speed)
+  return Math.abs(growth) < TRUSTED_GROWTH ? speed + (next - speed) / (1 - growth) : next
 }
 
-/** The polar of a section at a condition's own Mach number; null until known, a reason when it failed. */
-export function polarAt(
-  job: Job,
-  entry: JobEntry,
-  section: Section,
-  condition: Condition,
-  known: Known,
-): Polar | string | null {
+function firstSpeed(job: Job, condition: Condition): number {
+  const { air, load } = flightState(job.wing.area, flightOf(condition, 1))
+  return Math.sqrt((2 * load) / (air.density * job.wing.area * FIRST_LIFT))
+}
+
+/** The wing's input at a speed, null until its polars are known or when they failed. */
+function ready(job: Job, entry: JobEntry, condition: Condition, known: Known, speed: number): Planned {
+  if (entry.root === null || entry.tip === null) return { tasks: [], speed, fault: '', input: null }
+  const sections = entry.tip === entry.root ? [entry.root] : [entry.root, entry.tip]
+  const tasks = sections.map((section) => polarTasks(job, entry, section, condition, speed))
+  const all = tasks.flat()
+  const lines: SectionLine[] = []
+  const families: Polar[][] = []
+  for (const [k, some] of tasks.entries()) {
+    const polars = polarsOf(some, known)
+    if (polars === null) return { tasks: all, speed, fault: '', input: null }
+    if (typeof polars === 'string') return { tasks: all, speed, fault: polars, input: null }
+    const line = lineOf(job, condition, polars, speed)
+    if (line === null) {
+      const fault = `${sections[k].name}: no zero-lift angle between -12 and 20 deg`
+      return { tasks: all, speed, fault, input: null }
+    }
+    lines.push(line)
+    families.push(polars)
+  }
+  const input: WingInput = {
+    shape: job.wing,
+    aircraft: job.aircraft,
+    condition: flightOf(condition, speed),
+    root: lines[0],
+    tip: lines[lines.length - 1],
+    fixedReynolds: condition.reynolds,
+    ...(job.method === 'viscous'
+      ? { families: { root: families[0], tip: families[families.length - 1] } }
+      : {}),
+  }
+  return { tasks: all, speed, fault: '', input }
+}
+
+function polarsOf(tasks: readonly Task[], known: Known): Polar[] | string | null {
   const polars: Polar[] = []
-  for (const task of polarTasks(job, entry, section, condition)) {
+  for (const task of tasks) {
     const result = known.get(taskKey(task))
     if (result === undefined) return null
     if (result.kind === 'failed') return result.reason
     if (result.kind === 'polar') polars.push(result.polar)
   }
-  const mach = machOf(job, condition)
+  return polars
+}
+
+/** The lift line by which a section is named; null when one of its polars has none. */
+function lineOf(job: Job, condition: Condition, polars: Polar[], speed: number): SectionLine | null {
+  const { air } = flightState(job.wing.area, flightOf(condition, speed))
+  const mach = speed / air.speedOfSound
+  if (job.method !== 'viscous') return liftLine(betweenMachs(job, polars, mach))
+  if (polars.some((polar) => liftLine(polar) === null)) return null
+  return lineAt(polars, polars[0].reynolds!, mach)
+}
+
+function betweenMachs(job: Job, polars: readonly Polar[], mach: number): Polar {
   return polarBetween(polars[0], polars[polars.length - 1], machBracket(job.method, mach).fraction, mach)
 }
 
-/** The wing of an entry at a condition; null until its polars are known, a reason when they failed. */
-export function wingOf(
+/** The root section's polar at a Reynolds number and a Mach number, from the results of its tasks; null until known. */
+export function rootPolar(
   job: Job,
   entry: JobEntry,
-  condition: Condition,
+  tasks: readonly Task[],
   known: Known,
-): WingAtCondition | string | null {
-  if (condition.speed === 'slowest' || entry.root === null || entry.tip === null) return null
-  const lines: SectionLine[] = []
-  for (const section of [entry.root, entry.tip]) {
-    const polar = polarAt(job, entry, section, condition, known)
-    if (polar === null || typeof polar === 'string') return polar
-    const line = liftLine(polar)
-    if (line === null) return `${section.name}: no zero-lift angle between -12 and 20 deg`
-    lines.push(line)
-  }
-  return wingAt({
-    shape: job.wing,
-    aircraft: job.aircraft,
-    condition: flightOf(condition, condition.speed),
-    root: lines[0],
-    tip: lines[1],
-    fixedReynolds: condition.reynolds,
-  })
+  at: { readonly reynolds: number; readonly mach: number },
+): Polar | null {
+  const polars = polarsOf(
+    tasks.filter((task) => task.section === entry.root),
+    known,
+  )
+  if (polars === null || typeof polars === 'string' || polars.length === 0) return null
+  if (job.method !== 'viscous') return betweenMachs(job, polars, at.mach)
+  return polarAt(polars, at.reynolds, at.mach)?.polar ?? null
 }
 
-/** Distance of the shown station from the centreline, m. */
-export function stationOf(job: Job): number {
-  return job.station ?? meanAerodynamicChord(job.wing.stations).y
-}
-
-/** The section of an entry at the shown station. */
-export function sectionAtStation(job: Job, entry: JobEntry): Section | null {
-  if (entry.root === null || entry.tip === null) return null
-  return loft(entry.root, entry.tip, (2 * stationOf(job)) / job.wing.span)
-}
-
-/** The task of the surface pressure at the shown station; null where the method gives none. */
-export function pressureTask(
-  job: Job,
-  entry: JobEntry,
-  condition: Condition,
-  wing: WingAtCondition,
-): Task | null {
-  const section = sectionAtStation(job, entry)
-  if (job.method === 'thin' || section === null || wing.mach > 0.5) return null
-  return {
-    kind: 'pressure',
-    section,
-    state: sectionState(job, entry, condition, wing.mach),
-    at: { lift: localLiftAt(wing, stationOf(job)) },
-  }
+/** The wing of a plan that came to its end. */
+export function wingOf(planned: Planned): WingAtCondition | null {
+  return planned.input === null ? null : wingAt(planned.input)
 }

@@ -15,6 +15,8 @@ export interface LinearWing {
   readonly shape: WingShape
   readonly root: SectionLine
   readonly tip: SectionLine
+  /** The line at a distance y (m) where it is not linear in y: sections at their own Reynolds numbers. */
+  readonly lineOf?: (y: number) => SectionLine
 }
 
 /** One station of the wing at a condition. */
@@ -40,13 +42,18 @@ const STRIPS = 100
 /** Places looked at between the neighbours of the greatest station. */
 const PEAK_STEPS = 40
 
-/** A property of the sections at y, linear between root and tip. */
-function between({ root, tip }: LinearWing, share: number, of: (line: SectionLine) => number): number {
-  return of(root) + share * (of(tip) - of(root))
+/** A property of the sections at y (m), linear between root and tip unless the wing has lines of its own. */
+function propertyAt(
+  { shape, root, tip, lineOf }: LinearWing,
+  y: number,
+  of: (line: SectionLine) => number,
+): number {
+  if (lineOf !== undefined) return of(lineOf(y))
+  return of(root) + (y / tipOf(shape)) * (of(tip) - of(root))
 }
 
 /** Distance of the tip from the centreline, m: that of the stations, which may differ from the brief's by 0.1 %. */
-function tipOf({ stations }: WingShape): number {
+export function tipOf({ stations }: WingShape): number {
   return stations[stations.length - 1].y
 }
 
@@ -63,8 +70,8 @@ export function linearLiftingLine(wing: LinearWing): LiftingLine {
     span: 2 * tip,
     area,
     chord: (y) => stationAt(stations, y).chord,
-    slope: (y) => cosine * between(wing, y / tip, (line) => line.slope),
-    set: (y) => stationAt(stations, y).twist - between(wing, y / tip, (line) => line.zeroLift),
+    slope: (y) => cosine * propertyAt(wing, y, (line) => line.slope),
+    set: (y) => stationAt(stations, y).twist - propertyAt(wing, y, (line) => line.zeroLift),
     breaks: stations.map((station) => station.y),
   })
 }
@@ -123,7 +130,7 @@ export function momentStrips(wing: LinearWing, line: LiftingLine): MomentStrip[]
       y,
       width: tip * sin(theta) * step,
       chord: stationAt(wing.shape.stations, y).chord,
-      momentAtZeroLift: between(wing, y / tip, (of) => of.momentAtZeroLift),
+      momentAtZeroLift: propertyAt(wing, y, (of) => of.momentAtZeroLift),
       basicLift,
       additionalLift: localLift(line, atOne, y, one).liftCoefficient - basicLift,
     }

@@ -53,12 +53,14 @@ export interface TrimInput {
   readonly tailArm: number | null
 }
 
-/**
- * Load on the tail (N, up positive) that balances moments about the wing's aerodynamic centre:
- * (M_ac + n W (x_cg - x_ac)) / tail arm, x aft; null without a tail arm. Fuselage moment and tail drag are
- * not included.
- */
-export function tailLoad(input: TrimInput): number | null {
+/** The tail load as a function of dynamic pressure q: perPressure (m2) times q, plus constant (N). */
+export interface TailLoadLine {
+  readonly perPressure: number
+  readonly constant: number
+}
+
+/** The line of `tailLoad` in dynamic pressure, for a load that does not change; null without a tail arm. */
+export function tailLoadLine(input: Omit<TrimInput, 'dynamicPressure'>): TailLoadLine | null {
   if (input.tailArm === null) return null
   const { moment, meanChord } = input
   const quarter = meanChord.y * tan(input.sweepQuarterChord)
@@ -66,5 +68,18 @@ export function tailLoad(input: TrimInput): number | null {
     input.centreOfGravity === null
       ? 0
       : quarter + (input.centreOfGravity - 0.25) * meanChord.chord - moment.aerodynamicCentre
-  return (moment.momentOverPressure * input.dynamicPressure + input.load * lever) / input.tailArm
+  return {
+    perPressure: moment.momentOverPressure / input.tailArm,
+    constant: (input.load * lever) / input.tailArm,
+  }
+}
+
+/**
+ * Load on the tail (N, up positive) that balances moments about the wing's aerodynamic centre:
+ * (M_ac + n W (x_cg - x_ac)) / tail arm, x aft; null without a tail arm. Fuselage moment and tail drag are
+ * not included.
+ */
+export function tailLoad(input: TrimInput): number | null {
+  const line = tailLoadLine(input)
+  return line === null ? null : line.perPressure * input.dynamicPressure + line.constant
 }

@@ -1,15 +1,22 @@
 import { power } from '../numerics/elementary'
-import { flightState, reynoldsNumber, whyUnflyable, type FlightInput } from '../flight/conditions'
+import { whyUnflyable } from '../flight/conditions'
 import { BadInput } from '../numerics/errors'
-import type { SectionLine } from '../polar/liftLine'
 import { rootAngleForLift, wingLiftAt, wingLiftSlope } from './liftingLine'
-import { linearLiftingLine, momentStrips, peakLift, stationStates, type StationState } from './linearSections'
-import { meanAerodynamicChord, type WingShape } from './planform'
+import { peakLift, stationStates } from './linearSections'
+import { performance } from './performance'
 import { quickSlopes } from './quickFormulas'
-import { tailLoad, wingMoment } from './trim'
+import {
+  NO_STATION_FIGURES,
+  NO_VISCOUS_FIGURES,
+  viscousFigures,
+  type WingStationState,
+} from './viscousFigures'
+import { prepareWing } from './preparedWing'
+import type { WingInput } from './wingInput'
 import { wingNotes } from './wingNotes'
 
-export type { StationState } from './linearSections'
+export type { WingInput } from './wingInput'
+export type { WingStationState as StationState } from './viscousFigures'
 
 /** A wing at one condition; SI and radians. */
 export interface WingAtCondition {
@@ -37,33 +44,31 @@ export interface WingAtCondition {
   /** Up positive; null without a tail arm. */
   readonly tailLoad: number | null
   readonly rootBendingMoment: number
+  /** Null without viscous polars or where a point it rests on is not there; `missing` says why. */
+  readonly profileDragCoefficient: number | null
+  /** Largest C_L before a station reaches its section's maximum, at this condition's Reynolds number. */
+  readonly maxLiftCoefficient: number | null
+  /** Place of first stall as a share of the semispan. */
+  readonly stallAtSemispan: number | null
+  /** Smallest maximum less local lift over the outer 40 % at first stall. */
+  readonly tipMargin: number | null
+  readonly drag: number | null
+  readonly power: number | null
+  /** At load factor 1 only. */
+  readonly glideRatio: number | null
+  readonly sink: number | null
   readonly peakLiftCoefficient: number
   readonly peakLiftAt: number
   /** From the centreline to the tip. */
-  readonly stations: readonly StationState[]
+  readonly stations: readonly WingStationState[]
   /** Quick formulas beside the lifting line. */
   readonly helmboldSlope: number
   readonly handbookSlope: number
   /** Where a quick formula is used outside its range. */
   readonly quickWarnings: readonly string[]
   readonly notes: readonly string[]
-}
-
-/** What a wing needs to be computed at a condition. */
-export interface WingInput {
-  readonly shape: WingShape
-  readonly aircraft: {
-    readonly tailArm: number | null
-    readonly centreOfGravity: number | null
-    /** Without a tail there is no tail load, whatever the arm. */
-    readonly tailless: boolean
-  }
-  readonly condition: FlightInput
-  /** Section properties at the root and at the tip, linear in y between them. */
-  readonly root: SectionLine
-  readonly tip: SectionLine
-  /** A Reynolds number at the mean aerodynamic chord in place of that flown; null: as flown. */
-  readonly fixedReynolds: number | null
+  /** Figures that the method gives but that are missing here, and why; they mark the condition. */
+  readonly missing: readonly string[]
 }
 
 const SMALLEST_LIFT_FOR_EFFICIENCY = 0.05
@@ -76,29 +81,22 @@ export function wingAt(input: WingInput): WingAtCondition {
   const { shape, condition } = input
   const fault = whyUnflyable(condition)
   if (fault !== null) throw new BadInput(fault)
-  const flight = flightState(shape.area, condition)
-  const meanChord = meanAerodynamicChord(shape.stations)
-  const line = linearLiftingLine(input)
+  const wing = prepareWing(input)
+  const { flight, line, mach, reynolds, tail: balance } = wing
   const q = flight.dynamicPressure
-  const tailArm = input.aircraft.tailless ? null : input.aircraft.tailArm
-  const tail = tailLoad({
-    dynamicPressure: q,
-    load: flight.load,
-    moment: wingMoment(momentStrips(input, line), shape.sweepQuarterChord),
-    meanChord,
-    sweepQuarterChord: shape.sweepQuarterChord,
-    centreOfGravity: input.aircraft.centreOfGravity,
-    tailArm,
-  })
+  const tail = balance === null ? null : balance.perPressure * q + balance.constant
   const liftCoefficient = (flight.load - (tail ?? 0)) / (q * shape.area)
   const alpha = rootAngleForLift(line, liftCoefficient)
   const totals = wingLiftAt(line, alpha)
-  const reynolds = input.fixedReynolds ?? reynoldsNumber(flight.air, condition.speed, meanChord.chord)
-  const stations = stationStates(input, line, alpha, (chord) => (reynolds * chord) / meanChord.chord)
+  const plain = stationStates(wing.linear, line, alpha, wing.reynoldsOf)
+  const viscous =
+    wing.sections === null
+      ? { ...NO_VISCOUS_FIGURES, stations: plain.map((station) => ({ ...station, ...NO_STATION_FIGURES })) }
+      : viscousFigures(wing.sections, line, plain, liftCoefficient)
+  const { stations } = viscous
   const peak = peakLift(line, alpha, stations)
-  const mach = condition.speed / flight.air.speedOfSound
   const aspectRatio = power(line.input.span, 2) / shape.area
-  const quick = quickSlopes(input, mach)
+  const quick = quickSlopes(wing.linear, mach)
   return {
     temperature: flight.air.temperature,
     pressure: flight.air.pressure,
@@ -122,6 +120,20 @@ export function wingAt(input: WingInput): WingAtCondition {
     inducedDrag: totals.inducedDragCoefficient * q * shape.area,
     tailLoad: tail,
     rootBendingMoment: totals.rootMomentOverPressure * q,
+    profileDragCoefficient: viscous.profileDragCoefficient,
+    maxLiftCoefficient: viscous.maxLiftCoefficient,
+    stallAtSemispan: viscous.stallAtSemispan,
+    tipMargin: viscous.tipMargin,
+    ...performance({
+      dynamicPressure: q,
+      area: shape.area,
+      profileDragCoefficient: viscous.profileDragCoefficient,
+      inducedDragCoefficient: totals.inducedDragCoefficient,
+      dragArea: input.aircraft.dragArea ?? 0,
+      speed: condition.speed,
+      weight: flight.load / condition.loadFactor,
+      loadFactor: condition.loadFactor,
+    }),
     peakLiftCoefficient: peak.liftCoefficient,
     peakLiftAt: peak.y,
     stations,
@@ -136,9 +148,10 @@ export function wingAt(input: WingInput): WingAtCondition {
       leastReynolds: Math.min(...stations.map((station) => station.reynolds)),
       greatestReynolds: Math.max(...stations.map((station) => station.reynolds)),
       tailless: input.aircraft.tailless,
-      lacksCentreOfGravity: tailArm !== null && input.aircraft.centreOfGravity === null,
-      lacksTailArm: tailArm === null,
+      lacksCentreOfGravity: wing.tailArm !== null && input.aircraft.centreOfGravity === null,
+      lacksTailArm: wing.tailArm === null,
     }),
+    missing: viscous.missing,
   }
 }
 

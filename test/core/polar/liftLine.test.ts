@@ -39,16 +39,32 @@ describe('the straight line of a polar', () => {
     expect(liftLine(polarOf([...straight, [0.3, 0.95]]))!.slope).toBeCloseTo(6, 12)
   })
 
-  it('leaves out what did not converge', () => {
+  it('ends at what did not converge, on either side', () => {
     const line = liftLine(
       polarOf([
-        [-0.05, -0.3],
-        [0, 9, false],
+        [-0.025, -0.19],
+        [-0.02, 0, false],
+        [-0.01, -0.06],
         [0.05, 0.3],
         [0.1, 0.6],
+        [0.11, 9, false],
+        [0.12, 0.5],
       ]),
     )!
     expect(line.slope).toBeCloseTo(6, 12)
+  })
+
+  it('is none where the lift crosses zero beside a point that did not converge', () => {
+    expect(
+      liftLine(
+        polarOf([
+          [-0.05, -0.3],
+          [0, 9, false],
+          [0.05, 0.3],
+          [0.1, 0.6],
+        ]),
+      ),
+    ).toBeNull()
   })
 
   it.each([
