@@ -12,6 +12,10 @@ export interface View {
   hover: PointState | null
   theme: Theme
   sort: { column: string; descending: boolean } | null
+  /** Keys of the polar plots that are not shown. */
+  hiddenPolars: readonly string[]
+  /** The middle pane shows boundary layers in place of pressure. */
+  layersShown: boolean
   /** The first-start hint has been read. */
   hint: boolean
 }
@@ -19,5 +23,6 @@ export interface View {
 export function createView(): View {
   return reactive<View>({
     ...{ name: 'Compare', condition: 0, hover: null, theme: 'system', sort: null, hint: true },
+    ...{ hiddenPolars: ['transition'], layersShown: false },
   }) as View
 }
