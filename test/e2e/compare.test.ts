@@ -151,7 +151,7 @@ describe('the window', () => {
     await page.locator('[data-plot="lift"]').focus()
     await page.keyboard.press('ArrowRight')
     await page
-      .getByText(/angle of attack, deg -?\d+\.\d+, lift coefficient c_l/)
+      .getByText(/angle of attack, deg -?\d+\.\d+, lift c_l/)
       .first()
       .waitFor({ state: 'attached' })
     expect(await page.locator('.shortlist tr.marked').count()).toBe(1)

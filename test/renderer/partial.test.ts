@@ -17,7 +17,7 @@ describe('a comparison that is still computed', () => {
 
   it('says how far a section is, and nothing when it is done', () => {
     expect(progressWords({ done: 0, of: 2 })).toBe('waiting…')
-    expect(progressWords({ done: 1, of: 2 })).toBe('computing, 1 of 2 conditions done')
+    expect(progressWords({ done: 1, of: 2 })).toBe('1 of 2 conditions done')
     expect(progressWords({ done: 2, of: 2 })).toBe('')
   })
 

@@ -18,15 +18,15 @@ const KINDS: readonly Kind[] = [
   },
   {
     ...{ key: 'momentum thickness', title: 'Momentum thickness', read: (layer) => layer.momentumThickness },
-    y: { label: 'momentum thickness θ/c', symbol: 'θ/c', unit: '', decimals: 5, from: 0 },
+    y: { label: 'thickness θ/c', symbol: 'θ/c', unit: '', decimals: 5, from: 0 },
   },
   {
-    ...{ key: 'friction', title: 'Friction', read: (layer) => layer.frictionCoefficient },
-    y: { label: 'friction coefficient c_f', symbol: 'c_f', unit: '', decimals: 5 },
+    ...{ key: 'friction', title: 'Friction coefficient', read: (layer) => layer.frictionCoefficient },
+    y: { label: 'friction c_f', symbol: 'c_f', unit: '', decimals: 5 },
   },
   {
-    ...{ key: 'amplification', title: 'Amplification', read: (layer) => layer.amplification },
-    y: { label: 'amplification exponent N', symbol: 'N', unit: '', decimals: 1, from: 0 },
+    ...{ key: 'amplification', title: 'Amplification exponent', read: (layer) => layer.amplification },
+    y: { label: 'exponent N', symbol: 'N', unit: '', decimals: 1, from: 0 },
   },
 ]
 

@@ -23,17 +23,17 @@ const liftToDrag: Reading = (point) =>
     ? null
     : point.liftCoefficient / point.dragCoefficient
 
-const LIFT: Axis = { label: 'lift coefficient c_l', symbol: 'c_l', unit: '', decimals: 2 }
+const LIFT: Axis = { label: 'lift c_l', symbol: 'c_l', unit: '', decimals: 2 }
 const ANGLE: Axis = { label: 'angle of attack, deg', symbol: 'angle', unit: '°', decimals: 1 }
 const MOMENT: Axis = {
-  ...{ label: 'moment coefficient c_m, ¼ chord', symbol: 'c_m', unit: '', decimals: 3 },
+  ...{ label: 'c_m at ¼ chord', symbol: 'c_m', unit: '', decimals: 3 },
   // Thin-airfoil theory holds the moment constant to rounding: that is a level line, not noise.
   leastSpan: 0.04,
 }
-const DRAG: Axis = { label: 'drag coefficient c_d', symbol: 'c_d', unit: '', decimals: 4, from: 0 }
-const GLIDE: Axis = { label: 'lift to drag c_l / c_d', symbol: 'c_l / c_d', unit: '', decimals: 0 }
+const DRAG: Axis = { label: 'drag c_d', symbol: 'c_d', unit: '', decimals: 4, from: 0 }
+const GLIDE: Axis = { label: 'c_l / c_d', symbol: 'c_l / c_d', unit: '', decimals: 0 }
 const PLACE: Axis = {
-  ...{ label: 'transition at x/c', symbol: 'transition x/c', unit: '', decimals: 2 },
+  ...{ label: 'transition x/c', symbol: 'transition x/c', unit: '', decimals: 2 },
   ...{ from: 0, to: 1 },
 }
 

@@ -38,5 +38,5 @@ function sameConditions(a: Comparison, b: Comparison): boolean {
 /** The progress of an entry in words; empty once it is done. */
 export function progressWords(progress: EntryProgress | undefined): string {
   if (progress === undefined || progress.done === progress.of) return ''
-  return progress.done === 0 ? 'waiting…' : `computing, ${progress.done} of ${progress.of} conditions done`
+  return progress.done === 0 ? 'waiting…' : `${progress.done} of ${progress.of} conditions done`
 }

@@ -121,7 +121,7 @@ describe('PolarsPane', () => {
     const plot = pane.get('[data-plot="lift"]')
     await plot.trigger('keydown', { key: 'ArrowRight' })
     expect(pane.get('[aria-live]').text()).toMatch(
-      /^NACA 4412: angle of attack, deg 4\.500, lift coefficient c_l \d\.\d+/,
+      /^NACA 4412: angle of attack, deg 4\.500, lift c_l \d\.\d+/,
     )
     expect(pane.emitted('update:hover')).toHaveLength(1)
     await plot.trigger('keydown', { key: 'ArrowDown' })
