@@ -33,6 +33,7 @@ export default defineConfig({
           serve: 'src/serve/index.ts',
           start: 'src/serve/start.ts',
           bench: 'bench/run.ts',
+          published: 'test/published/report/run.ts',
         },
         output: { format: 'es', entryFileNames: '[name].js', chunkFileNames: 'chunks/[name]-[hash].js' },
       },

@@ -1,8 +1,10 @@
 import { compareCold, compareWarm } from './cli/compare.bench'
 import { shortlistOfSix } from './core/job/shortlist.bench'
 import { angleSweep, angleSweepFromText } from './core/polar/angleSweep.bench'
+import { viscousPolar } from './core/polar/viscousPolar.bench'
 import { liftingLine } from './core/wing/liftingLine.bench'
 import { windowStart } from './renderer/windowStart.bench'
+import { viscousShortlist } from './run/viscousShortlist.bench'
 
 /** What is timed: `run` as a whole and, if given, its parts on their own. Times are medians. */
 export interface Measured {
@@ -24,14 +26,13 @@ export interface Bench {
   readonly make: () => Measured | NotHere | Promise<Measured | NotHere>
 }
 
-const NO_VISCOUS: NotHere = { note: 'there is no viscous method yet' }
-
 /** All benches, in the order in which they run. */
 export const benches: readonly Bench[] = [
   { name: 'angle_sweep_41', make: angleSweep },
   { name: 'angle_sweep_41_from_text', make: angleSweepFromText },
-  { name: 'viscous_polar_31_re1e6', make: () => NO_VISCOUS },
-  { name: 'viscous_polar_31_re6e6', make: () => NO_VISCOUS },
+  { name: 'viscous_polar_31_re1e6', make: () => viscousPolar(1e6) },
+  { name: 'viscous_polar_31_re6e6', make: () => viscousPolar(6e6) },
+  { name: 'viscous_shortlist_6x5', make: viscousShortlist },
   { name: 'lifting_line', make: liftingLine },
   { name: 'shortlist_of_six', make: shortlistOfSix },
   { name: 'compare_cold', make: compareCold },

@@ -29,7 +29,7 @@ export function compareCold(): Measured {
       compare(cache)
       rmSync(cache, { recursive: true, force: true })
     },
-    note: 'whole process; inviscid: polars, pressures and wings of five entries at five conditions',
+    note: 'whole process, all cores: polars, pressures and wings of five entries at five conditions',
   }
 }
 

@@ -6,6 +6,7 @@ import { compareFiles } from '../io/csv'
 import { readArguments } from './arguments'
 import { runBrief } from './briefRun'
 import { Failure } from './failure'
+import { METHOD_HELP } from './methods'
 import { writeOutputs } from './outputs'
 import type { Command } from './terminal'
 
@@ -15,8 +16,7 @@ The whole job of a brief: every entry of its shortlist on its wing at each condi
 pressures.csv and wing.csv into DIR, which is made if it is not there. All are written, or none.
 
   --out DIR                 where the files go
-  --method thin|panel       thin-airfoil theory, or vortex panels (default: panel)
-
+${METHOD_HELP}
 Exit status 1: something is marked (a condition that cannot be flown, an entry that cannot be used); it is
 named, the rest is computed and written.
 `

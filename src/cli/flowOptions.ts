@@ -3,12 +3,15 @@ import {
   DEFAULT_PANELS,
   FEWEST_PANELS,
   GREATEST_MACH,
+  GREATEST_REYNOLDS,
+  LEAST_REYNOLDS,
   MOST_PANELS,
+  type Method,
   type SectionState,
 } from '../core'
 import { numberIn, wordOf } from './arguments'
 import { Failure } from './failure'
-import { readMethod } from './methods'
+import { METHOD_HELP, readMethod } from './methods'
 
 /** The options of every command that solves the flow round single sections. */
 export const FLOW_OPTIONS = {
@@ -47,7 +50,7 @@ const DIRTY = { upper: 0.05, lower: 0.1 }
 export function readStates(given: FlowArguments): SectionState[] {
   const method = readMethod(given.method)
   const amplification = readAir(given)
-  const reynolds = (given.reynolds ?? []).map((text) => numberIn('--reynolds', text, 1, 1e9))
+  const reynolds = readReynolds(method, given.reynolds ?? [])
   const named = wordOf('--surface', given.surface, ['clean', 'dirty'])
   const usual = named === 'dirty' ? DIRTY : { upper: 1, lower: 1 }
   const trip = (option: '--trip-upper' | '--trip-lower', text: string | undefined, none: number): number =>
@@ -68,8 +71,19 @@ export function readStates(given: FlowArguments): SectionState[] {
     panels,
   }
   if (method !== 'viscous') return [state]
-  if (reynolds.length === 0) throw new Failure('--method viscous needs --reynolds R')
   return reynolds.map((value) => ({ ...state, reynolds: value, amplification }))
+}
+
+/** Chord Reynolds numbers. A method without boundary layers takes any number and does not use it. */
+function readReynolds(method: Method, given: readonly string[]): number[] {
+  if (method !== 'viscous') return given.map((text) => numberIn('--reynolds', text, 0, Number.MAX_VALUE))
+  if (given.length === 0) {
+    throw new Failure(
+      `--reynolds R is needed, ${LEAST_REYNOLDS} to ${GREATEST_REYNOLDS}: chord times speed over kinematic ` +
+        'viscosity (or choose --method panel, which has no boundary layer)',
+    )
+  }
+  return given.map((text) => numberIn('--reynolds', text, LEAST_REYNOLDS, GREATEST_REYNOLDS))
 }
 
 /** The critical amplification factor, from turbulence in per cent or as given; not both. */
@@ -82,13 +96,12 @@ function readAir({ turbulence, amplification }: FlowArguments): number {
 }
 
 /** The part of the help that these options share. */
-export const FLOW_HELP = `  --method thin|panel       thin-airfoil theory, or vortex panels (default: panel)
+export const FLOW_HELP = `${METHOD_HELP}  --reynolds R              chord Reynolds number, ${LEAST_REYNOLDS} to ${GREATEST_REYNOLDS}; viscous needs it, the others ignore it
   --mach M                  free-stream Mach number, 0 to ${GREATEST_MACH} (default 0; thin is always incompressible)
-  --surface clean|dirty     dirty: the flow is turbulent from 0.05 chord above and 0.10 below (default clean)
-  --trip-upper X            transition forced at this chord fraction on one side; 1: none
-  --trip-lower X
+  --turbulence PERCENT      free-stream turbulence, 0.07 to 2.98 (default 0.07, still air)
+  --amplification N         or the critical amplification factor that it stands for, 0 to 14
+  --surface clean|dirty     dirty: transition is forced at 0.05 chord above and 0.10 below (default clean)
+  --trip-upper X            transition is forced at this chord fraction on one side, unless it comes earlier
+  --trip-lower X            by itself; 1: none. Either one makes the surface dirty
   --panels N                panels round the section, ${FEWEST_PANELS} to ${MOST_PANELS} (default ${DEFAULT_PANELS})
-  --reynolds R              Reynolds number; not used by thin and panel
-  --turbulence PERCENT      free-stream turbulence, 0.07 to 2.98; not used by thin and panel
-  --amplification N         critical amplification factor instead, 0 to 14; not used by thin and panel
 `

@@ -1,3 +1,4 @@
+import { setMaxListeners } from 'node:events'
 import { BadInput } from '../core'
 import { FileProblem } from '../io/problem'
 import { Failure, STATUS } from './failure'
@@ -70,20 +71,35 @@ function statusOf(error: unknown, name: string, terminal: Terminal): number {
 }
 
 const interrupt = new AbortController()
+// Every task that waits listens for Ctrl-C; that many listeners are no leak.
+setMaxListeners(0, interrupt.signal)
 process.once('SIGINT', () => interrupt.abort())
 
 // A reader that has gone is met where the text is written; here it must only not end the program.
 process.stdout.on('error', () => {})
+
+/** Whether a line of progress stands on the terminal, to be wiped before the next message. */
+let progressShown = false
+function wipeProgress(): void {
+  if (progressShown) process.stderr.write('\r\x1b[K')
+  progressShown = false
+}
 
 const terminal: Terminal = {
   print: (text) =>
     new Promise((resolve, reject) => {
       process.stdout.write(text, (error) => (error ? reject(error) : resolve()))
     }),
-  complain: (line) => process.stderr.write(line.endsWith('\n') ? line : `${line}\n`),
+  complain: (line) => {
+    wipeProgress()
+    process.stderr.write(line.endsWith('\n') ? line : `${line}\n`)
+  },
   progress: (done, asked) => {
-    if (process.stderr.isTTY)
-      process.stderr.write(done < asked ? `\r${done} of ${asked} computed` : '\r\x1b[K')
+    if (!process.stderr.isTTY) return
+    wipeProgress()
+    if (done >= asked) return
+    process.stderr.write(`${done} of ${asked} computed`)
+    progressShown = true
   },
   folder: callersFolder(process.env, process.cwd()),
   env: process.env,
@@ -95,3 +111,4 @@ const argv = process.argv.slice(2)
 process.exitCode = await main(argv, terminal).catch((error: unknown) =>
   statusOf(error, argv[0] ?? '', terminal),
 )
+wipeProgress()

@@ -1,6 +1,7 @@
-import { runTask, type Operating, type PressureResult } from '../core'
+import type { Operating, PressureResult } from '../core'
 import { pressureCsv } from '../io/csv'
 import { numberIn, readArguments } from './arguments'
+import { compute } from './compute'
 import { Failure, STATUS } from './failure'
 import { FLOW_HELP, FLOW_OPTIONS, readStates } from './flowOptions'
 import { checkPlaces, writeOutputs } from './outputs'
@@ -10,7 +11,7 @@ import type { Command } from './terminal'
 const HELP = `Usage: pressure SECTION --alpha A | --lift CL [options]
 
 Surface pressure of one section as CSV on standard output, from the upper trailing edge round the nose to
-the lower one.
+the lower one, with one --reynolds.
 
   --alpha A                 at this angle of attack, degrees
   --lift CL                 or at this lift coefficient
@@ -39,10 +40,8 @@ export const pressure: Command = {
     checkPlaces([values.csv], terminal)
     const [named] = readSections(positionals, values, terminal)
     const { name, section } = named!
-    const result = runTask({ kind: 'pressure', section, state, at })
-    if (result.kind !== 'pressure') {
-      throw new Failure(`${name}: ${result.kind === 'failed' ? result.reason : 'not computed'}`)
-    }
+    const [result] = await compute([{ name, task: { kind: 'pressure', section, state, at } }], terminal)
+    if (result?.kind !== 'pressure') throw new Failure(`${name}: not computed`)
     await writeOutputs([{ to: values.csv, text: pressureCsv(name, result.pressure) }], terminal)
     return report(name, result.pressure, terminal.complain)
   },
@@ -57,6 +56,8 @@ function readOperating(alpha: string | undefined, lift: string | undefined): Ope
 }
 
 function report(name: string, result: PressureResult, complain: (line: string) => void): number {
-  if (result.reason !== '') complain(`${name}: ${result.reason}`)
-  return result.converged ? STATUS.done : STATUS.marked
+  const { converged, reason } = result
+  if (!converged) complain(`${name}: not converged, no rows: ${reason}`)
+  else if (reason !== '') complain(`${name}: ${reason}`)
+  return converged ? STATUS.done : STATUS.marked
 }

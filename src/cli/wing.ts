@@ -3,6 +3,7 @@ import { wingJson } from '../io/wingJson'
 import { readArguments } from './arguments'
 import { runBrief, type Sections } from './briefRun'
 import { Failure } from './failure'
+import { METHOD_HELP } from './methods'
 import { checkPlaces, writeOutputs } from './outputs'
 import type { Command } from './terminal'
 
@@ -12,8 +13,7 @@ The wing of a brief at each of its conditions, for each entry of its shortlist, 
 
   --section SECTION         in place of the shortlist: a wing of this section (may be repeated)
   --root A --tip B          in place of the shortlist: a wing from section A at the root to B at the tip
-  --method thin|panel       thin-airfoil theory, or vortex panels (default: panel)
-  --csv FILE                one row a station instead of JSON; - is standard output
+${METHOD_HELP}  --csv FILE                one row a station instead of JSON; - is standard output
 
 Exit status 1: something is marked (a condition that cannot be flown, an entry that cannot be used); it is
 named, the rest is computed.

@@ -13,6 +13,9 @@ export type ResultMessage =
 /** The buffers of a result that may leave the worker by transfer, each once. */
 export function transferables(result: TaskResult): ArrayBuffer[] {
   if (result.kind !== 'pressure') return []
-  const { x, y, pressureCoefficient } = result.pressure
-  return [...new Set([x, y, pressureCoefficient].map((values) => values.buffer as ArrayBuffer))]
+  const { layers, ...surface } = result.pressure
+  const arrays = [surface, layers?.upper, layers?.lower].flatMap((fields) =>
+    Object.values(fields ?? {}).filter((value) => value instanceof Float64Array),
+  )
+  return [...new Set(arrays.map((values) => values.buffer as ArrayBuffer))]
 }

@@ -37,7 +37,7 @@ beforeAll(async () => {
 
 describe('wing', () => {
   it('prints each entry at each condition; a slowest speed is null with a note and no fault', async () => {
-    const { status, out, err } = await here(['wing', brief])
+    const { status, out, err } = await here(['wing', brief, '--method', 'panel'])
     expect(status).toBe(0)
     expect(err).toContain('Slowest')
     const { wings } = JSON.parse(out) as Wings
@@ -72,6 +72,7 @@ describe('wing', () => {
         '--tip',
         'own.txt',
       ],
+      ...['--method', 'panel'],
     ])
     expect(status).toBe(0)
     const { wings } = JSON.parse(out) as Wings
@@ -97,8 +98,8 @@ describe('wing', () => {
 
 describe('compare', () => {
   it('writes its files into a folder that it makes, and the same bytes each time', async () => {
-    const first = await here(['compare', brief, '--out', 'out/one'])
-    const second = await here(['compare', brief, '--out', 'out/two'])
+    const first = await here(['compare', brief, '--out', 'out/one', '--method', 'panel'])
+    const second = await here(['compare', brief, '--out', 'out/two', '--method', 'panel'])
     expect([first.status, first.out]).toEqual([0, ''])
     expect(second.status).toBe(0)
     const names = await readdir(join(folder(), 'out', 'one'))
@@ -113,7 +114,10 @@ describe('compare', () => {
   it('gives the same bytes from the cache as without', async () => {
     const env = { SECTIONWRIGHT_NO_CACHE: '', XDG_CACHE_HOME: join(folder(), 'cache') }
     for (const out of ['fresh', 'kept']) {
-      const { status } = await command(['compare', brief, '--out', out], { folder: folder(), env })
+      const { status } = await command(['compare', brief, '--out', out, '--method', 'panel'], {
+        folder: folder(),
+        env,
+      })
       expect(status).toBe(0)
     }
     expect((await readdir(join(folder(), 'cache', 'sectionwright'))).length).toBeGreaterThan(2)
@@ -127,7 +131,7 @@ describe('compare', () => {
 
   it('reads paths in a brief relative to the brief, and calls an entry by its name', async () => {
     const own = await writeBrief('lens.brief.json', { shortlist: [{ section: 'lens.txt', name: 'My lens' }] })
-    const { status } = await here(['compare', own, '--out', 'lens'])
+    const { status } = await here(['compare', own, '--out', 'lens', '--method', 'panel'])
     expect(status).toBe(0)
     const rows = cells(await readFile(join(folder(), 'lens', 'polars.csv'), 'utf8'))
     expect(rows[1]![0]).toBe('My lens')
@@ -145,7 +149,7 @@ describe('compare', () => {
         { name: 'Standing', speed_m_s: 0, altitude_m: 0 },
       ],
     })
-    const { status, err } = await here(['compare', marked, '--out', 'marked'])
+    const { status, err } = await here(['compare', marked, '--out', 'marked', '--method', 'panel'])
     expect(status).toBe(1)
     expect(err).toContain('missing.txt')
     expect(err).toContain('Standing')
@@ -157,7 +161,7 @@ describe('compare', () => {
     const limited = await writeBrief('limited.brief.json', {
       limits: [{ figure: 'beauty', at_least: 3 }],
     })
-    const { status, err } = await here(['wing', limited])
+    const { status, err } = await here(['wing', limited, '--method', 'panel'])
     expect(status).toBe(1)
     expect(err).toContain('beauty')
   })
@@ -211,7 +215,11 @@ describe('bad input of briefs', () => {
     ],
     ['a folder below a file', ['compare', 'briefs/small.brief.json', '--out', 'briefs/lens.txt/x'], 'folder'],
     ['half a pair', ['wing', 'briefs/small.brief.json', '--root', 'naca:2412'], '--tip'],
-    ['viscous, which is not there', ['wing', 'briefs/small.brief.json', '--method', 'viscous'], '--method'],
+    [
+      'a method that there is not',
+      ['wing', 'briefs/small.brief.json', '--method', 'exact'],
+      'thin or panel or viscous',
+    ],
     [
       'a bad section of several',
       ['wing', 'briefs/small.brief.json', '--section', 'naca:2412', '--section', 'missing.txt'],

@@ -3,18 +3,33 @@ import { join } from 'node:path'
 import { describe, expect, it } from 'vitest'
 import { cacheFolder, diskCache } from '../../src/cli/diskCache'
 import type { TaskResult } from '../../src/core'
+import type { SideLayer } from '../../src/core/flow/surfaceLayers'
 import { temporaryFolder } from '../support/commandLine'
 
 const root = temporaryFolder()
 let count = 0
 const fresh = (): string => join(root(), `cache-${count++}`)
 
+/** A side's boundary layer; its amplification is not a number behind transition. */
+const side = (value: number): SideLayer => ({
+  ...{ transition: 0.5, laminarSeparation: null, reattachment: null, turbulentSeparation: 0.9 },
+  ...{ x: Float64Array.of(0, 0.5, 1), momentumThickness: Float64Array.of(1e-5, value, 1) },
+  ...{ shapeFactor: Float64Array.of(2.2, 2.6, 1.4), frictionCoefficient: Float64Array.of(-0, -1e-4, value) },
+  amplification: Float64Array.of(0, 9, NaN),
+})
+
 function result(value: number): TaskResult {
   const values = Float64Array.from([value, -0, 1 / 3])
   return {
     kind: 'pressure',
     pressure: {
-      layers: null,
+      layers: {
+        upper: side(value),
+        lower: side(-value),
+        dragCoefficient: 0.01,
+        frictionDrag: 0,
+        pressureDrag: 0,
+      },
       ...{ method: 'panel', alpha: 0.1, liftCoefficient: 0.5, momentCoefficient: -0.05 },
       ...{ x: values, y: values.slice(), pressureCoefficient: values.slice(), converged: true, reason: '' },
     },

@@ -10,6 +10,8 @@ const folder = temporaryFolder()
 const signal = new AbortController().signal
 const BUILT = pathToFileURL(join(process.cwd(), 'out', 'main', 'cliWorker.js'))
 
+const VISCOUS = { method: 'viscous', reynolds: 1e6, amplification: 9 } as const
+
 function tasks(): Task[] {
   const state: SectionState = {
     ...{ method: 'panel', reynolds: null, mach: 0.2, surface: 'clean', amplification: null },
@@ -20,6 +22,8 @@ function tasks(): Task[] {
     { kind: 'polar', section, state, alphas: [-0.05, 0, 0.1] },
     { kind: 'pressure', section, state, at: { lift: 0.4 } },
     { kind: 'pressure', section, state: { ...state, method: 'thin' }, at: { lift: 0.4 } },
+    { kind: 'pressure', section, state: { ...state, ...VISCOUS }, at: { alpha: 0.03 } },
+    { kind: 'polar', section, state: { ...state, ...VISCOUS }, alphas: [0.03] },
   ]
 }
 

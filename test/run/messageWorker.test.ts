@@ -1,7 +1,8 @@
 import { describe, expect, it } from 'vitest'
-import type { TaskResult } from '../../src/core'
+import { nacaSection, runTask, type Task, type TaskResult } from '../../src/core'
 import { transferables, type ResultMessage, type TaskMessage } from '../../src/run/messages'
 import { messageWorker } from '../../src/run/messageWorker'
+import { sectionState } from '../support/states'
 import { longTask, resultOf } from './fakes'
 
 function fakePort(): {
@@ -59,6 +60,13 @@ describe('a worker that speaks by messages', () => {
   })
 })
 
+/** A viscous pressure on few panels: quick, and with boundary layers. */
+const task = {
+  kind: 'pressure',
+  section: nacaSection('2412'),
+  state: sectionState({ method: 'viscous', reynolds: 1e6, amplification: 9, panels: 60 }),
+} satisfies Partial<Task>
+
 describe('what may be transferred', () => {
   it('is every buffer of a pressure once, and nothing of a polar', () => {
     const shared = new Float64Array(4)
@@ -68,5 +76,20 @@ describe('what may be transferred', () => {
     } as unknown as TaskResult
     expect(transferables(pressure)).toHaveLength(2)
     expect(transferables(resultOf('a'))).toEqual([])
+  })
+
+  it('is every array of the boundary layers too, so that none is copied', () => {
+    const result = runTask({ ...task, at: { alpha: 0.03 } })
+    if (result.kind !== 'pressure' || result.pressure.layers === null) throw new Error('no layers')
+    const { layers, x, y, pressureCoefficient } = result.pressure
+    const sides = [layers.upper, layers.lower].flatMap((side) => [
+      ...[side.x, side.momentumThickness, side.shapeFactor, side.frictionCoefficient, side.amplification],
+    ])
+    const buffers = [x, y, pressureCoefficient, ...sides].map((values) => values.buffer)
+    expect(new Set(transferables(result))).toEqual(new Set(buffers))
+    const sent = structuredClone(result, { transfer: transferables(result) })
+    expect(x).toHaveLength(0)
+    for (const values of sides) expect(values).toHaveLength(0)
+    expect(sent.pressure.layers!.upper.x.length).toBeGreaterThan(10)
   })
 })
