@@ -7,6 +7,7 @@ import './style/window.css'
 import './style/brief.css'
 import './style/shortlist.css'
 import './style/panes.css'
+import './style/plots.css'
 import './style/shapes.css'
 import './style/wing.css'
 
