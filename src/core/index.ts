@@ -1,6 +1,7 @@
 export { BadInput } from './numerics/errors'
 export type { Section, MeanLine, Edge, ChordLine } from './shape/section'
-export type { Method, Surface, Polar, PolarPoint } from './polar/polar'
+export type { Method, Surface, Polar, PolarPoint, LiftLimit } from './polar/polar'
+export type { SurfaceLayers, SideLayer } from './flow/surfaceLayers'
 export type { WingShape, WingStation } from './wing/planform'
 export type { Aircraft, Condition, Job, JobEntry } from './job/job'
 export type { Task, TaskResult } from './job/task'

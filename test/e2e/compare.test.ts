@@ -151,7 +151,7 @@ describe('the window', () => {
     await page.locator('[data-plot="lift"]').focus()
     await page.keyboard.press('ArrowRight')
     await page
-      .getByText(/angle, deg -?\d+\.\d+, lift c_l/)
+      .getByText(/angle of attack, deg -?\d+\.\d+, lift c_l/)
       .first()
       .waitFor({ state: 'attached' })
     expect(await page.locator('.shortlist tr.marked').count()).toBe(1)
@@ -195,6 +195,35 @@ describe('the window', () => {
     await caution.focus()
     await page.keyboard.press('Enter')
     await page.getByText('the applicable airworthiness').waitFor()
+  })
+
+  it('cancels at once, keeps the last figures marked, and computes again when asked', async () => {
+    const codes = Array.from({ length: 40 }, (_, i) => `24${String(i + 6).padStart(2, '0')}`)
+    await page.getByLabel('Add NACA code').fill(codes.join(' '))
+    await page.keyboard.press('Enter')
+    await page.getByRole('button', { name: 'Cancel', exact: true }).first().click()
+    await page.getByText('Cancelled.').waitFor()
+    expect(await page.locator('progress').count()).toBe(0)
+    expect(await page.getByText('updating…').count()).toBeGreaterThan(0)
+    expect(await curvesIn(page, 'lift')).toBeGreaterThanOrEqual(5)
+    while ((await rows().count()) > 6) await page.getByRole('button', { name: 'Undo', exact: true }).click()
+    await computed(page)
+    expect(await curvesIn(page, 'lift')).toBe(5)
+  })
+
+  it('takes the method, forced transition and a fixed Reynolds number', async () => {
+    await page.getByLabel('Method').selectOption({ label: 'thin-airfoil theory' })
+    await page.getByText('Thin-airfoil theory gives no surface pressure').waitFor()
+    await computed(page)
+    await page.getByLabel('Method').selectOption({ label: 'panels, without boundary layers' })
+    await computed(page)
+    expect(await curvesIn(page, 'pressure')).toBe(5)
+    await page.getByRole('button', { name: 'Transition', exact: true }).first().click()
+    await page.getByLabel('Upper side, forced at x/c').filter({ visible: true }).fill('0,3')
+    await page.getByRole('button', { name: 'Close', exact: true }).filter({ visible: true }).click()
+    await page.getByRole('button', { name: 'Undo', exact: true }).hover()
+    expect(await page.getByTitle('Undo: force transition').count()).toBe(1)
+    await computed(page)
   })
 
   it('says why the slowest condition has no figures yet', async () => {

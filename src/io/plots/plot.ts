@@ -37,6 +37,39 @@ export interface Curve {
   readonly x: readonly number[]
   readonly y: readonly number[]
   readonly states: readonly PointState[]
+  /** Indices of points that no line joins to the one before: what lies between did not converge. */
+  readonly breaks?: readonly number[]
+  /** The side of the section that a curve of one side belongs to; the lower one is drawn thinner. */
+  readonly side?: 'upper' | 'lower'
+}
+
+/** An angle at which an entry has no result. */
+export interface PlotFailure {
+  readonly entry: number
+  readonly name: string
+  /** rad */
+  readonly alpha: number
+  readonly reason: string
+}
+
+/** The greatest or least lift of an entry. */
+export interface PlotEnd {
+  readonly entry: number
+  readonly x: number
+  readonly y: number
+  /** What limits the lift, in words. */
+  readonly words: string
+}
+
+/** What happens to a layer at a place of the surface. */
+export type LayerEventKind = 'transition' | 'laminar separation' | 'reattachment' | 'turbulent separation'
+
+/** An event of a layer, drawn on a curve. */
+export interface PlotEvent {
+  readonly entry: number
+  readonly kind: LayerEventKind
+  readonly x: number
+  readonly y: number
 }
 
 /** A single point that is marked on a curve: the shown condition. */
@@ -61,6 +94,10 @@ export interface Plot {
   readonly curves: readonly Curve[]
   readonly marks: readonly PlotMark[]
   readonly lines: readonly ReferenceLine[]
+  /** Failed angles; marked on the edge of a plot whose x axis is the angle in degrees. */
+  readonly failures?: readonly PlotFailure[]
+  readonly ends?: readonly PlotEnd[]
+  readonly events?: readonly PlotEvent[]
 }
 
 export const DEGREES = 180 / Math.PI

@@ -3,6 +3,7 @@ import { axisEnds, axisTicks, plotNumber } from '../../io/plots/axisTicks'
 import type { Curve, Plot, PointState } from '../../io/plots/plot'
 import { pointOfState } from '../../io/plots/pointOfState'
 import type { EntryStyle } from '../style/palette'
+import { markSets } from './plotMarks'
 import type { Zoom } from './zoom'
 
 interface Point {
@@ -43,10 +44,10 @@ export function chartOf(
     Number(b.entry === hover?.entry) - Number(a.entry === hover?.entry)
   const curves = plot.curves.map((curve): LineSet => ({
     label: curve.name,
-    data: curve.x.map((x, i) => ({ x, y: curve.y[i]! })),
+    data: pointsOf(curve),
     borderColor: colour(curve.entry),
     borderDash: [...(styles[curve.entry]?.dash ?? [])],
-    borderWidth: hover?.entry === curve.entry ? 2.6 : 1.7,
+    borderWidth: (hover?.entry === curve.entry ? 2.6 : 1.7) * (curve.side === 'lower' ? THINNER : 1),
     borderJoinStyle: 'round',
     pointRadius: 0,
   }))
@@ -66,10 +67,11 @@ export function chartOf(
     const i = hover === null ? -1 : pointOfState(states, hover)
     return i < 0 ? [] : [spot({ x: x[i]!, y: y[i]! }, entry, 5.5, ink.colour('var(--panel)'))]
   })
+  const others = markSets(plot, seen.y, colour, ink.colour('var(--panel)'))
   return {
     type: 'line',
     // The library draws the first set on top.
-    data: { datasets: [...hovered, ...marks, ...curves, ...referenceLines(plot, seen, soft)] },
+    data: { datasets: [...hovered, ...marks, ...others, ...curves, ...referenceLines(plot, seen, soft)] },
     options: {
       animation: false,
       responsive: true,
@@ -80,6 +82,16 @@ export function chartOf(
       scales: { x: axisOf(plot, 'x', seen, ink), y: axisOf(plot, 'y', seen, ink) },
     },
   }
+}
+
+/** Strokes of the lower side are thinner by this. */
+const THINNER = 0.6
+/** Not drawn: the line ends before it and begins anew behind it. */
+const GAP: Point = { x: Number.NaN, y: Number.NaN }
+
+/** The points of a curve with a gap wherever it is broken. */
+function pointsOf({ x, y, breaks = [] }: Curve): Point[] {
+  return x.flatMap((at, i) => [...(breaks.includes(i) ? [GAP] : []), { x: at, y: y[i]! }])
 }
 
 function axisOf(plot: Plot, which: 'x' | 'y', seen: NonNullable<Zoom>, ink: Ink) {

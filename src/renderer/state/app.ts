@@ -26,11 +26,15 @@ export function createApp(host: Host, worker: Worker) {
   let keeping: ReturnType<typeof setTimeout> | undefined
   watch(document.brief, (brief) => {
     clearTimeout(typing)
-    typing = setTimeout(() => desk.compute(brief), TYPING_PAUSE_MS)
+    typing = setTimeout(() => desk.compute(brief, view.method), TYPING_PAUSE_MS)
     if (view.condition >= brief.conditions.length) view.condition = Math.max(0, brief.conditions.length - 1)
     clearTimeout(keeping)
     keeping = setTimeout(() => void keepForRecovery(brief), RECOVERY_PAUSE_MS)
   })
+  watch(
+    () => view.method,
+    (method) => desk.compute(document.brief.value, method),
+  )
   watch(
     [document.brief, document.unsaved],
     ([{ name }, unsaved]) => void host.showDocument({ title: name, unsaved }),
@@ -75,7 +79,7 @@ export function createApp(host: Host, worker: Worker) {
     say,
     attempt,
     cancel: desk.cancel,
-    recompute: (): void => desk.compute(document.brief.value),
+    recompute: (): void => desk.compute(document.brief.value, view.method),
     styles: computed(() =>
       document.brief.value.shortlist.map(({ colour, mark }, i) =>
         entryStyle(colour ?? i, mark ?? colour ?? i),
@@ -121,7 +125,9 @@ export function createApp(host: Host, worker: Worker) {
       }),
     exportFiles: (): Promise<void> =>
       attempt(async () => {
-        const saved = await host.saveFiles(await desk.ask({ kind: 'export', brief: document.brief.value }))
+        const saved = await host.saveFiles(
+          await desk.ask({ kind: 'export', brief: document.brief.value, method: view.method }),
+        )
         if (saved !== null) say(`Exported ${saved.name}`)
       }),
   }

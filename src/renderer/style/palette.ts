@@ -23,11 +23,15 @@ const MARKERS = ['circle', 'triangle', 'rect', 'rectRot', 'star', 'cross', 'circ
 /** Colours in the palette; the style sheet holds them as --entry-0 to --entry-7, for light and dark. */
 export const PALETTE_SIZE = 8
 
-/** The style of a colour and a mark by their numbers, which wrap round. */
+/** Numbers past the palette take the dash this many places on: a repeated colour has another dash and mark. */
+const NEXT_ROUND = 3
+
+/** The style of a colour and a mark by their numbers; colours repeat after the palette, whole styles do not soon. */
 export function entryStyle(colour: number, mark: number): EntryStyle {
+  const place = (mark + NEXT_ROUND * Math.floor(mark / PALETTE_SIZE)) % PALETTE_SIZE
   return {
     colour: `var(--entry-${colour % PALETTE_SIZE})`,
-    dash: DASHES[mark % PALETTE_SIZE]!,
-    marker: MARKERS[mark % PALETTE_SIZE]!,
+    dash: DASHES[place]!,
+    marker: MARKERS[place]!,
   }
 }

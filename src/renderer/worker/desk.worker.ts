@@ -1,4 +1,4 @@
-import { assemble, type Comparison } from '../../core'
+import { assemble, type Comparison, type Method } from '../../core'
 import { readBrief, writeBrief, type Brief } from '../../io/brief'
 import { decodeText } from '../../io/coordinates'
 import { compareFiles } from '../../io/csv'
@@ -28,8 +28,8 @@ const noFiles: ReadBytes = (path) => {
   throw new FileProblem(path, null, 'the file is not at hand', 'remove the entry and open the file here')
 }
 
-const ready = (brief: Brief): ReadyJob =>
-  jobFromBrief(brief, 'the brief', noFiles, { method: 'panel', allowEmpty: true })
+const ready = (brief: Brief, method: Method): ReadyJob =>
+  jobFromBrief(brief, 'the brief', noFiles, { method, allowEmpty: true })
 
 async function complete(ready: ReadyJob, signal: AbortSignal, tell?: (known: Known, p: Progress) => void) {
   return run(ready.job, { pool: poolOf, store, signal, ...(tell ? { onResult: tell } : {}) })
@@ -37,11 +37,11 @@ async function complete(ready: ReadyJob, signal: AbortSignal, tell?: (known: Kno
 
 let current = new AbortController()
 
-async function compute(version: number, brief: Brief): Promise<void> {
+async function compute(version: number, brief: Brief, method: Method): Promise<void> {
   current.abort()
   const mine = (current = new AbortController())
   try {
-    const prepared = ready(brief)
+    const prepared = ready(brief, method)
     const tell = (comparison: Comparison, progress: Progress, finished: boolean): void => {
       const { faults, warnings } = prepared
       post({ kind: 'comparison', version, comparison, faults, warnings, ...progress, finished })
@@ -72,7 +72,7 @@ async function answer(question: Question): Promise<unknown> {
       return writeBrief(question.brief)
     case 'export': {
       // From the text of the brief, so that the files are those of the brief as saved.
-      const prepared = ready(readBrief(writeBrief(question.brief), 'the brief'))
+      const prepared = ready(readBrief(writeBrief(question.brief), 'the brief'), question.method)
       const known = await complete(prepared, new AbortController().signal)
       return compareFiles(assemble(prepared.job, known))
     }
@@ -84,7 +84,7 @@ const wordsOf = (error: unknown): string => (error instanceof Error ? error.mess
 self.addEventListener('message', (event: MessageEvent<DeskRequest>) => {
   const request = event.data
   if (request.kind === 'cancel') current.abort()
-  else if (request.kind === 'compute') void compute(request.version, request.brief)
+  else if (request.kind === 'compute') void compute(request.version, request.brief, request.method)
   else {
     const { id, question } = request
     answer(question).then(

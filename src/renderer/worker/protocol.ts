@@ -1,9 +1,15 @@
-import type { Comparison } from '../../core'
+import type { Comparison, Method } from '../../core'
 import type { Brief, BriefEntry } from '../../io/briefTypes'
+
+/** Methods that the window offers, the one that it begins with first. */
+export const METHODS: readonly { readonly method: Method; readonly words: string }[] = [
+  { method: 'panel', words: 'panels, without boundary layers' },
+  { method: 'thin', words: 'thin-airfoil theory' },
+]
 
 /** What the window asks of the desk worker. */
 export type DeskRequest =
-  | { readonly kind: 'compute'; readonly version: number; readonly brief: Brief }
+  | { readonly kind: 'compute'; readonly version: number; readonly brief: Brief; readonly method: Method }
   | { readonly kind: 'cancel' }
   | { readonly kind: 'ask'; readonly id: number; readonly question: Question }
 
@@ -13,7 +19,7 @@ export type Question =
   | { readonly kind: 'read codes'; readonly text: string }
   | { readonly kind: 'read brief'; readonly name: string; readonly bytes: Uint8Array }
   | { readonly kind: 'brief text'; readonly brief: Brief }
-  | { readonly kind: 'export'; readonly brief: Brief }
+  | { readonly kind: 'export'; readonly brief: Brief; readonly method: Method }
 
 /** The report of one text read as a section; `entry` is null when it could not be. */
 export interface Reading {

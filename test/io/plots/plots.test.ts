@@ -40,8 +40,8 @@ describe('the polar plots', () => {
     expect(plots.map((plot) => plot.key)).toEqual(['lift', 'moment'])
     expect(polarPlots(withDrag(panel), MAPPING).map((plot) => plot.key)).toEqual([
       'lift',
-      'moment',
       'drag',
+      'moment',
       'glide',
     ])
   })

@@ -34,7 +34,17 @@ describe('chartOf', () => {
   it('turns the axis of pressure over', () => {
     const plot = pressurePlot(comparison, MAPPING)
     const { options } = chartOf(plot, styles, { hover: null, zoom: null }, ink)
-    expect(options!.scales!['y']).toMatchObject({ reverse: true, max: 1 })
+    expect(options!.scales!['y']!.reverse).toBe(true)
+  })
+
+  it('ends the axis of pressure at 1, or above the stagnation value where that is greater', () => {
+    const plot = pressurePlot(comparison, MAPPING)
+    const greatest = Math.max(...plot.curves.flatMap(({ y }) => y))
+    // Air speed of the test brief gives a Mach number above 0.07: more than 1 at the stagnation point.
+    expect(greatest).toBeGreaterThan(1)
+    expect(plot.y.to).toBeGreaterThan(greatest)
+    expect(plot.y.to).toBeLessThan(1.1)
+    expect(pressurePlot(comparisonOf({ computed: false }), MAPPING).y.to).toBe(1)
   })
 
   it('shows the part that is looked at', () => {

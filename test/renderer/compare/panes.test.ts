@@ -120,7 +120,9 @@ describe('PolarsPane', () => {
     const pane = mount(PolarsPane, { props: props() })
     const plot = pane.get('[data-plot="lift"]')
     await plot.trigger('keydown', { key: 'ArrowRight' })
-    expect(pane.get('[aria-live]').text()).toMatch(/^NACA 4412: angle, deg 4\.500, lift c_l \d\.\d+/)
+    expect(pane.get('[aria-live]').text()).toMatch(
+      /^NACA 4412: angle of attack, deg 4\.500, lift c_l \d\.\d+/,
+    )
     expect(pane.emitted('update:hover')).toHaveLength(1)
     await plot.trigger('keydown', { key: 'ArrowDown' })
     expect(pane.get('[aria-live]').text()).toContain('NACA 2415')

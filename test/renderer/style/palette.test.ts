@@ -78,8 +78,13 @@ describe('entryStyle', () => {
     expect(new Set(styles.map((style) => style.dash.join())).size).toBe(8)
   })
 
-  it('begins again after the last', () => {
-    expect(entryStyle(PALETTE_SIZE, PALETTE_SIZE)).toEqual(entryStyle(0, 0))
+  it('repeats a colour only with another dash and another mark', () => {
+    for (let i = 0; i < PALETTE_SIZE; i++) {
+      const [first, again] = [entryStyle(i, i), entryStyle(i + PALETTE_SIZE, i + PALETTE_SIZE)]
+      expect(again.colour).toBe(first.colour)
+      expect(again.dash).not.toEqual(first.dash)
+      expect(again.marker).not.toBe(first.marker)
+    }
   })
 })
 
