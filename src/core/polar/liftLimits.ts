@@ -1,14 +1,13 @@
 import type { LiftLimit, PolarPoint } from './polar'
 
-/** Fall of the lift coefficient behind a maximum that makes it the stall, not a kink of the polar. */
-const STALL_FALL = 0.02
+/** Lift that is regained within this angle was lost to a bubble, not to the stall; rad. */
+const RECOVERY = (4 * Math.PI) / 180
 
 /**
  * The greatest lift of a polar (`direction` 1), or the least (-1): walking from the angle of least size
- * outwards, the first extreme behind which the lift falls by 0.02, or the last one if the walk ends on lower
- * lift. Null when lift still grows at the end of the points, or the walk meets a point that did not converge
- * before the extreme is passed. `nose` is the angle that limits the lift by its suction peak; a point must
- * stand there.
+ * outwards, the first extreme that no point within the next 4 deg exceeds. `nose` is the angle that limits
+ * the lift by its suction peak; a point must stand there. Null when lift still grows at the end of the points
+ * or at the limit of a solved stretch: next to a point that did not converge an extreme is not known.
  */
 export function liftLimit(
   points: readonly PolarPoint[],
@@ -18,18 +17,29 @@ export function liftLimit(
   const outward = points
     .filter(({ alpha }) => alpha * direction >= 0)
     .sort((a, b) => direction * (a.alpha - b.alpha))
-  let best: LiftLimit | null = null
-  let fallen = false
-  for (const { alpha, liftCoefficient, converged } of outward) {
-    if (!converged || liftCoefficient === null) return null
-    if (best === null || direction * (liftCoefficient - best.liftCoefficient) > 0) {
-      best = { alpha, liftCoefficient, by: 'layers' }
-      fallen = false
-    } else {
-      fallen = true
-      if (direction * (best.liftCoefficient - liftCoefficient) >= STALL_FALL) return best
+  let best: { readonly at: number; readonly alpha: number; readonly lift: number } | null = null
+  for (let i = 0; i < outward.length; i++) {
+    const { alpha, liftCoefficient, converged } = outward[i]
+    if (best !== null && direction * (alpha - best.alpha) > RECOVERY) break
+    if (converged && liftCoefficient !== null) {
+      if (best === null || direction * (liftCoefficient - best.lift) > 0) {
+        best = { at: i, alpha, lift: liftCoefficient }
+      }
     }
-    if (nose !== null && direction * (alpha - nose) >= 0) return fallen ? best : { ...best, by: 'nose' }
+    if (nose !== null && direction * (alpha - nose) >= 0) {
+      return best?.alpha === alpha
+        ? { alpha, liftCoefficient: best.lift, by: 'nose' }
+        : limitAt(outward, best)
+    }
   }
-  return fallen ? best : null
+  return limitAt(outward, best)
+}
+
+/** The extreme as the layers' own limit, unless it lies at an end of what is known. */
+function limitAt(
+  outward: readonly PolarPoint[],
+  best: { readonly at: number; readonly alpha: number; readonly lift: number } | null,
+): LiftLimit | null {
+  if (best === null || !outward[best.at - 1]?.converged || !outward[best.at + 1]?.converged) return null
+  return { alpha: best.alpha, liftCoefficient: best.lift, by: 'layers' }
 }
