@@ -1,11 +1,11 @@
 /** The whole job in a real Chromium, by mouse and keyboard, its files compared with the command line's. */
 import { execFileSync } from 'node:child_process'
-import { mkdtempSync, readFileSync, rmSync } from 'node:fs'
+import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import type { Download, Page } from 'playwright-core'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
-import { computed, curvesIn, openWindow, type OpenWindow } from './window'
+import { chooseMethod, computed, curvesIn, openWindow, type OpenWindow } from './window'
 
 let opened: OpenWindow
 let page: Page
@@ -22,6 +22,9 @@ afterEach(async () => {
   rmSync(folder, { recursive: true, force: true })
   expect(opened.complaints).toEqual([])
 })
+
+/** A brief of one section and two conditions is some twenty polars. */
+const VISCOUS_PATIENCE = 240_000
 
 const rows = () => page.locator('.shortlist tbody tr')
 
@@ -55,6 +58,23 @@ async function downloads(count: number, act: () => Promise<void>): Promise<Map<s
   )
 }
 
+/** Expects the exported files to equal those of `compare` byte for byte. */
+function expectComparesFiles(exported: ReadonlyMap<string, Buffer>, brief: string, method: string): void {
+  const out = join(folder, 'out')
+  try {
+    execFileSync(process.execPath, ['out/main/cli.js', 'compare', brief, '--out', out, '--method', method], {
+      env: { ...process.env, SECTIONWRIGHT_NO_CACHE: '1' },
+      stdio: 'pipe',
+    })
+  } catch (error) {
+    // 1: something is marked, such as the scan that is warned of; anything else is a fault.
+    expect((error as { status: number }).status).toBe(1)
+  }
+  for (const name of ['polars.csv', 'pressures.csv', 'wing.csv']) {
+    expect(exported.get(name)!.equals(readFileSync(join(out, name))), name).toBe(true)
+  }
+}
+
 describe('the window', () => {
   it('opens the sample brief, computed, with a curve for each section in every pane', async () => {
     expect(await page.getByLabel('Name of the brief').inputValue()).toBe('Shoreline mapping drone')
@@ -83,21 +103,9 @@ describe('the window', () => {
 
     const saved = await downloads(1, () => page.getByRole('button', { name: 'Save', exact: true }).click())
     const brief = join(folder, 'job.brief.json')
-    const { writeFileSync } = await import('node:fs')
     writeFileSync(brief, [...saved.values()][0]!)
     const exported = await downloads(3, () => page.getByRole('button', { name: 'Export CSV' }).click())
-    try {
-      execFileSync(process.execPath, ['out/main/cli.js', 'compare', brief, '--out', join(folder, 'out')], {
-        env: { ...process.env, SECTIONWRIGHT_NO_CACHE: '1' },
-        stdio: 'pipe',
-      })
-    } catch (error) {
-      // 1: the condition "slowest" is only marked or the scan warned of; anything else is a fault.
-      expect((error as { status: number }).status).toBe(1)
-    }
-    for (const name of ['polars.csv', 'pressures.csv', 'wing.csv']) {
-      expect(exported.get(name)!.equals(readFileSync(join(folder, 'out', name))), name).toBe(true)
-    }
+    expectComparesFiles(exported, brief, 'panel')
   })
 
   it('names what is wrong with a file, keeps the good one, and loses nothing', async () => {
@@ -225,6 +233,28 @@ describe('the window', () => {
     expect(await page.getByTitle('Undo: force transition').count()).toBe(1)
     await computed(page)
   })
+
+  it(
+    'computes with boundary layers: polars, slowest speed, layers on demand, and files as compare writes them',
+    async () => {
+      while ((await rows().count()) > 1)
+        await page.getByRole('button', { name: 'Remove', exact: true }).last().click()
+      await chooseMethod(page, 'panels with boundary layers')
+      await computed(page, VISCOUS_PATIENCE)
+      for (const plot of ['pressure', 'lift', 'drag', 'moment']) {
+        expect(await curvesIn(page, plot), plot).toBeGreaterThan(0)
+      }
+      await page.getByRole('radio', { name: /Slowest, sea level.*C_L 1\.\d\d/ }).click()
+      await page.getByRole('button', { name: 'Boundary layers' }).click()
+      expect(await curvesIn(page, 'shape factor')).toBeGreaterThan(0)
+      const saved = await downloads(1, () => page.getByRole('button', { name: 'Save', exact: true }).click())
+      const brief = join(folder, 'job.brief.json')
+      writeFileSync(brief, [...saved.values()][0]!)
+      const exported = await downloads(3, () => page.getByRole('button', { name: 'Export CSV' }).click())
+      expectComparesFiles(exported, brief, 'viscous')
+    },
+    VISCOUS_PATIENCE,
+  )
 
   it('says why the slowest condition has no figures yet', async () => {
     await page.getByRole('radio', { name: /Slowest, sea level/ }).click()

@@ -55,8 +55,23 @@ export const COLUMNS: readonly Column[] = [
   },
   {
     ...{ key: 'induced', title: 'Induced drag', unit: 'N', digits: 2 },
-    help: 'Induced drag of the wing; profile drag needs the viscous method',
+    help: 'Induced drag of the wing',
     value: (entry, _, i) => entry.conditions[i]?.wing?.inducedDrag ?? null,
+  },
+  {
+    ...{ key: 'drag', title: 'Drag', unit: 'N', digits: 2 },
+    help: 'Profile and induced drag of the wing and the drag area of the rest; needs boundary layers',
+    value: (entry, _, i) => entry.conditions[i]?.wing?.drag ?? null,
+  },
+  {
+    ...{ key: 'maxLift', title: 'Max C_L', unit: '', digits: 3 },
+    help: 'Lift coefficient of the wing when the first station stalls; needs boundary layers',
+    value: (entry, _, i) => entry.conditions[i]?.wing?.maxLiftCoefficient ?? null,
+  },
+  {
+    ...{ key: 'speed', title: 'Speed', unit: 'm/s', digits: 2 },
+    help: 'True airspeed at the condition; at "slowest" that at which the wing just carries its load',
+    value: (entry, _, i) => entry.conditions[i]?.wing?.speed ?? null,
   },
   {
     ...{ key: 'bending', title: 'Root bending', unit: 'N m', digits: 0 },
