@@ -72,6 +72,7 @@ export function polarTasks(
       section,
       state: sectionState(job, entry, condition, { reynolds, mach }),
       alphas: POLAR_ALPHAS,
+      toTheStall: true,
     })),
   )
 }

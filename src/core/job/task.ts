@@ -11,6 +11,8 @@ export type Task =
       readonly section: Section
       readonly state: SectionState
       readonly alphas: readonly number[]
+      /** Ends the viscous sweep each way once the stall is sure. */
+      readonly toTheStall?: boolean
     }
   | {
       readonly kind: 'pressure'
@@ -29,7 +31,7 @@ export type TaskResult =
 export function runTask(task: Task): TaskResult {
   try {
     return task.kind === 'polar'
-      ? { kind: 'polar', polar: sweep(task.section, task.state, task.alphas) }
+      ? { kind: 'polar', polar: sweep(task.section, task.state, task.alphas, task) }
       : { kind: 'pressure', pressure: pressureAt(task.section, task.state, task.at) }
   } catch (error) {
     if (error instanceof BadInput) return { kind: 'failed', reason: error.message }

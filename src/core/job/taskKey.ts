@@ -7,7 +7,7 @@ import type { Task } from './task'
  * closed-form mean line; names and notes do not matter to the result and stay out.
  */
 export function taskKey(task: Task): string {
-  const asked = task.kind === 'polar' ? task.alphas : task.at
+  const asked = task.kind === 'polar' ? [task.alphas, task.toTheStall ?? false] : task.at
   return `${task.kind} ${sectionKey(task.section)} ${canonical(task.state)} ${canonical(asked)}`
 }
 

@@ -2,6 +2,8 @@ import type { LiftLimit, PolarPoint } from './polar'
 
 /** Lift that is regained within this angle was lost to a bubble, not to the stall; rad. */
 const RECOVERY = (4 * Math.PI) / 180
+/** For angles that rounding puts just beyond, rad. */
+const SLACK = 1e-9
 
 /**
  * The greatest lift of a polar (`direction` 1), or the least (-1): walking from the angle of least size
@@ -20,7 +22,7 @@ export function liftLimit(
   let best: { readonly at: number; readonly alpha: number; readonly lift: number } | null = null
   for (let i = 0; i < outward.length; i++) {
     const { alpha, liftCoefficient, converged } = outward[i]
-    if (best !== null && direction * (alpha - best.alpha) > RECOVERY) break
+    if (best !== null && direction * (alpha - best.alpha) > RECOVERY + SLACK) break
     if (converged && liftCoefficient !== null) {
       if (best === null || direction * (liftCoefficient - best.lift) > 0) {
         best = { at: i, alpha, lift: liftCoefficient }
@@ -42,4 +44,15 @@ function limitAt(
 ): LiftLimit | null {
   if (best === null || !outward[best.at - 1]?.converged || !outward[best.at + 1]?.converged) return null
   return { alpha: best.alpha, liftCoefficient: best.lift, by: 'layers' }
+}
+
+/** Whether an angle lies so far behind the extreme of the points on its side that no recovery counts any more. */
+export function isPastStall(points: readonly PolarPoint[], alpha: number): boolean {
+  const direction = alpha < 0 ? -1 : 1
+  let best: PolarPoint | null = null
+  for (const point of points) {
+    if (point.liftCoefficient === null || point.alpha * direction < 0) continue
+    if (best === null || direction * (point.liftCoefficient - best.liftCoefficient!) > 0) best = point
+  }
+  return best !== null && direction * (alpha - best.alpha) > RECOVERY + SLACK
 }

@@ -8,7 +8,7 @@ import type { Section } from '../shape/section'
 import { NO_LIMITS, type Polar, type PolarPoint } from './polar'
 import type { Operating, PressureResult, SectionState } from './state'
 import { viscousPressure } from './viscousPressure'
-import { viscousSweep } from './viscousSweep'
+import { viscousSweep, type SweepExtent } from './viscousSweep'
 
 /** Fields that a method without a boundary layer leaves empty. */
 const NO_BOUNDARY_LAYER = { dragCoefficient: null, transitionUpper: null, transitionLower: null } as const
@@ -18,8 +18,13 @@ const NO_BOUNDARY_LAYER = { dragCoefficient: null, transitionUpper: null, transi
  * incompressible and is recorded at Mach 0. Throws BadInput for a method that does not exist, a panel count
  * or a Mach number outside its range.
  */
-export function sweep(section: Section, state: SectionState, alphas: readonly number[]): Polar {
-  if (state.method === 'viscous') return viscousSweep(section, state, alphas)
+export function sweep(
+  section: Section,
+  state: SectionState,
+  alphas: readonly number[],
+  extent: SweepExtent = {},
+): Polar {
+  if (state.method === 'viscous') return viscousSweep(section, state, alphas, extent)
   checkState(state)
   const absurd = alphas.find((alpha) => !Number.isFinite(alpha))
   if (absurd !== undefined) throw new BadInput(`angle of attack ${absurd}: give a finite angle`)

@@ -14,7 +14,7 @@ import type { ViscousSection } from '../flow/viscousSection'
 
 /** x/c at which transition is forced in the first solution. */
 const GUARD = 0.95
-/** Angles aside from which a branch is followed back, rad. */
+/** Angles aside from which a solution is followed to its place, rad; a free one from the first two alone. */
 const ASIDE = [-1, 1, -2, 2].map((degrees) => (degrees * Math.PI) / 180)
 /** Halvings of the step of the angle when a point is approached from a solved neighbour. */
 const MOST_HALVINGS = 3
@@ -53,7 +53,7 @@ function release(
 ): ViscousSolution {
   const free = letFree(section, setting, guarded)
   if (free.converged) return free
-  for (const aside of ASIDE) {
+  for (const aside of ASIDE.slice(0, 2)) {
     const there = solveAtAngle(
       section,
       guardedSetting(setting, GUARD),
@@ -66,8 +66,7 @@ function release(
     const back = solveAtAngle(section, setting, copyLayers(freeThere.layers), guarded.alpha, { fresh: true })
     if (back.converged) return back
   }
-  const cold = solveAtAngle(section, setting, coldLayers(section, guarded.alpha, setting), guarded.alpha)
-  return cold.converged ? cold : free
+  return free
 }
 
 function letFree(
@@ -110,12 +109,13 @@ function approach(
   return cold
 }
 
-/** Solutions at `alphas` (rad): from the angle nearest to zero outwards both ways, each from its neighbour. */
+/** Solutions at `alphas` (rad): from the angle nearest to zero outwards both ways, each from its neighbour; a way ends where `enough`. */
 export function solveSweep(
   section: ViscousSection,
   setting: ViscousSetting,
   alphas: readonly number[],
   visit: (index: number, point: MarchedPoint) => void,
+  enough: (alpha: number) => boolean = () => false,
 ): void {
   const order = alphas.map((_, i) => i).sort((i, j) => alphas[i] - alphas[j])
   const start = order.reduce(
@@ -126,6 +126,7 @@ export function solveSweep(
   for (const direction of [1, -1]) {
     let neighbour = first
     for (let k = direction === 1 ? start : start - 1; k >= 0 && k < order.length; k += direction) {
+      if (enough(alphas[order[k]])) break
       const point = solvePoint(section, setting, alphas[order[k]], neighbour)
       const { guarded } = point
       visit(order[k], point)

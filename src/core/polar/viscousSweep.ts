@@ -3,7 +3,7 @@ import type { ViscousSolution } from '../flow/interaction'
 import type { ViscousSection } from '../flow/viscousSection'
 import { BadInput } from '../numerics/errors'
 import type { Section } from '../shape/section'
-import { liftLimit } from './liftLimits'
+import { isPastStall, liftLimit } from './liftLimits'
 import { noseLimits } from './noseSuction'
 import { NO_LIMITS, type Polar, type PolarPoint } from './polar'
 import { refinementAngles } from './refine'
@@ -14,6 +14,14 @@ import { NO_PANELS, readySection, settingOf } from './viscousState'
 
 /** Times that the polar is refined. */
 const REFINEMENTS = 2
+/** How far a sweep goes. */
+export interface SweepExtent {
+  /** Ends each way once the stall is sure (see liftLimits.ts); the points behind are empty and say so. */
+  readonly toTheStall?: boolean
+}
+
+const PAST_STALL = 'past the stall: not computed'
+
 /** What stands in the reason of a point beyond the nose's limit. */
 export const BEYOND_NOSE = 'beyond the suction peak that sections of this nose have been seen to hold'
 
@@ -24,7 +32,12 @@ export const BEYOND_NOSE = 'beyond the suction peak that sections of this nose h
  * number outside 0 to 0.5, an amplification outside 0 to 14, a trip outside 0 to 1, a deflected flap or an
  * angle that is no number.
  */
-export function viscousSweep(section: Section, state: SectionState, alphas: readonly number[]): Polar {
+export function viscousSweep(
+  section: Section,
+  state: SectionState,
+  alphas: readonly number[],
+  { toTheStall = false }: SweepExtent = {},
+): Polar {
   const setting = settingOf(state)
   const absurd = alphas.find((alpha) => !Number.isFinite(alpha))
   if (absurd !== undefined) throw new BadInput(`angle of attack ${absurd}: give a finite angle`)
@@ -32,7 +45,7 @@ export function viscousSweep(section: Section, state: SectionState, alphas: read
   const results =
     ready === null
       ? { points: alphas.map((alpha) => emptyPoint(alpha, NO_PANELS)), ...NO_LIMITS }
-      : sweepReady(ready, setting, alphas)
+      : sweepReady(ready, setting, alphas, toTheStall)
   return {
     method: 'viscous',
     reynolds: setting.stream.reynolds,
@@ -48,13 +61,26 @@ export function viscousSweep(section: Section, state: SectionState, alphas: read
 
 type Results = Pick<Polar, 'points' | 'between' | 'maxLift' | 'minLift'>
 
-function sweepReady(ready: ViscousSection, setting: ViscousSetting, alphas: readonly number[]): Results {
+function sweepReady(
+  ready: ViscousSection,
+  setting: ViscousSetting,
+  alphas: readonly number[],
+  toTheStall: boolean,
+): Results {
   const starts: ViscousSolution[] = []
-  const asked = new Array<PolarPoint>(alphas.length)
-  solveSweep(ready, setting, alphas, (i, { solution, guarded }) => {
-    asked[i] = pointOf(ready, setting, alphas[i], solution)
-    if (guarded.converged) starts.push(guarded)
-  })
+  const asked = alphas.map((alpha) => emptyPoint(alpha, PAST_STALL))
+  const reached: PolarPoint[] = []
+  solveSweep(
+    ready,
+    setting,
+    alphas,
+    (i, { solution, guarded }) => {
+      asked[i] = pointOf(ready, setting, alphas[i], solution)
+      reached.push(asked[i])
+      if (guarded.converged) starts.push(guarded)
+    },
+    (alpha) => toTheStall && isPastStall(reached, alpha),
+  )
   const added: PolarPoint[] = []
   const add = (alpha: number): void => {
     const { solution, guarded } = solvePoint(ready, setting, alpha, nearest(starts, alpha))
