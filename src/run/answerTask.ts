@@ -1,4 +1,4 @@
-import { runTask } from '../core'
+import { runTask, type Section, type Task } from '../core'
 import { transferables, type ResultMessage, type TaskMessage } from './messages'
 
 /**
@@ -10,9 +10,29 @@ export function answerTask(
   post: (message: ResultMessage, transfer: ArrayBuffer[]) => void,
 ): void {
   try {
-    const result = runTask(task)
+    const result = runTask(withLastSection(task))
     post({ id, result }, transferables(result))
   } catch (error) {
     post({ id, fault: error instanceof Error ? error.message : String(error) }, [])
   }
+}
+
+let last: Section | null = null
+
+/**
+ * A message brings its own copy of a section. Where it is the section of the task before, that very object is
+ * taken, so that what the core remembers of it (panels, wakes) serves again.
+ */
+function withLastSection(task: Task): Task {
+  if (last !== null && sameSection(last, task.section)) return { ...task, section: last }
+  last = task.section
+  return task
+}
+
+function sameSection(a: Section, b: Section): boolean {
+  return (
+    a.x.length === b.x.length &&
+    a.x.every((x, i) => x === b.x[i] && a.y[i] === b.y[i]) &&
+    JSON.stringify([a.name, a.meanLine, a.notes]) === JSON.stringify([b.name, b.meanLine, b.notes])
+  )
 }

@@ -49,7 +49,7 @@ export function viscousPolar(reynolds: number): Measured {
   const factored = factorInPlace(Float64Array.from(filled), size)
   const rhs = new Float64Array(size)
   return {
-    run: () => void viscousSweep(section, state, POLAR_ALPHAS),
+    run: () => void viscousSweep({ ...section }, state, POLAR_ALPHAS),
     parts: {
       place_panels: () => void placePanels(section, state.panels),
       potential_flow: () => void solvePanels(panels),

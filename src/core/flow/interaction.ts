@@ -26,7 +26,7 @@ const MOST_ITERATIONS = 40
 /** Steps without progress after which they are shortened. */
 const PATIENCE = 5
 /** Steps without progress after which there will be none. */
-const HOPELESS = 12
+const HOPELESS = 16
 /** Relative change below which a step is small: layers may then be as steep as they like. */
 const SMALL_STEP = 0.1
 /** A linear system is used again as long as a step with it leaves less than this share of the residual. */

@@ -46,13 +46,22 @@ function limitAt(
   return { alpha: best.alpha, liftCoefficient: best.lift, by: 'layers' }
 }
 
-/** Whether an angle lies so far behind the extreme of the points on its side that no recovery counts any more. */
+/** Angles in a row without a solution behind which a way outwards is given up. */
+const LOST = 3
+
+/**
+ * Whether a way outwards (`points` in the order in which they were computed) need not go on to an angle: it
+ * lies so far behind the extreme on its side that no recovery counts any more, or the last three failed.
+ */
 export function isPastStall(points: readonly PolarPoint[], alpha: number): boolean {
   const direction = alpha < 0 ? -1 : 1
   let best: PolarPoint | null = null
+  let lost = 0
   for (const point of points) {
-    if (point.liftCoefficient === null || point.alpha * direction < 0) continue
+    if (point.alpha * direction < 0) continue
+    lost = point.converged ? 0 : lost + 1
+    if (point.liftCoefficient === null) continue
     if (best === null || direction * (point.liftCoefficient - best.liftCoefficient!) > 0) best = point
   }
-  return best !== null && direction * (alpha - best.alpha) > RECOVERY + SLACK
+  return lost >= LOST || (best !== null && direction * (alpha - best.alpha) > RECOVERY + SLACK)
 }

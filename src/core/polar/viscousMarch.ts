@@ -14,7 +14,7 @@ import type { ViscousSection } from '../flow/viscousSection'
 
 /** x/c at which transition is forced in the first solution. */
 const GUARD = 0.95
-/** Angles aside from which a solution is followed to its place, rad; a free one from the first two alone. */
+/** Angles aside from which a solution is followed to its place, rad. */
 const ASIDE = [-1, 1, -2, 2].map((degrees) => (degrees * Math.PI) / 180)
 /** Halvings of the step of the angle when a point is approached from a solved neighbour. */
 const MOST_HALVINGS = 3
@@ -53,7 +53,7 @@ function release(
 ): ViscousSolution {
   const free = letFree(section, setting, guarded)
   if (free.converged) return free
-  for (const aside of ASIDE.slice(0, 2)) {
+  for (const aside of ASIDE) {
     const there = solveAtAngle(
       section,
       guardedSetting(setting, GUARD),

@@ -60,8 +60,9 @@ function pressureOf(
     alpha: solution.alpha,
     liftCoefficient: loads.liftCoefficient,
     momentCoefficient: loads.momentCoefficient,
-    x: ready.flow.panels.x,
-    y: ready.flow.panels.y,
+    // Copies: results may be handed to another thread, and the section is used again.
+    x: ready.flow.panels.x.slice(),
+    y: ready.flow.panels.y.slice(),
     pressureCoefficient: loads.pressureCoefficient,
     layers: {
       upper: sideLayer(ready.flow, solution.layers, 0),

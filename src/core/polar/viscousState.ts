@@ -35,8 +35,22 @@ export function settingOf(state: SectionState): ViscousSetting {
 /** Why a section has no solution at all. */
 export const NO_PANELS = 'the panel equations have no solution for this outline'
 
+/** Sections made ready before, by their panel count: a section never changes, and its wakes serve every state. */
+const met = new WeakMap<Section, Map<number, ViscousSection | null>>()
+
 /** The section with its panels, null when they have no solution. Throws BadInput for a wide open edge. */
 export function readySection(section: Section, state: SectionState): ViscousSection | null {
+  const known = met.get(section) ?? new Map<number, ViscousSection | null>()
+  met.set(section, known)
+  const had = known.get(state.panels)
+  // The linear systems of former solutions stay out: no result may depend on what was computed before.
+  if (had) return { ...had, systems: new Map() }
+  const ready = prepareSection(section, state)
+  known.set(state.panels, ready)
+  return ready
+}
+
+function prepareSection(section: Section, state: SectionState): ViscousSection | null {
   const flow = solvePanels(placePanels(section, state.panels))
   if (flow.edge.gap >= GREATEST_GAP) {
     throw new BadInput(

@@ -20,7 +20,7 @@ export interface SweepExtent {
   readonly toTheStall?: boolean
 }
 
-const PAST_STALL = 'past the stall: not computed'
+const PAST_STALL = 'past the stall or the last angles with a solution: not computed'
 
 /** What stands in the reason of a point beyond the nose's limit. */
 export const BEYOND_NOSE = 'beyond the suction peak that sections of this nose have been seen to hold'

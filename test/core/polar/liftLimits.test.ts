@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { liftLimit } from '../../../src/core/polar/liftLimits'
+import { isPastStall, liftLimit } from '../../../src/core/polar/liftLimits'
 import type { PolarPoint } from '../../../src/core/polar/polar'
 
 const DEGREE = Math.PI / 180
@@ -47,5 +47,22 @@ describe('the limit of the lift of a polar', () => {
       ...{ alpha: 2 * DEGREE, liftCoefficient: 1, by: 'nose' },
     })
     expect(liftLimit(pointsOf([0, 0.5, 1, 0.9, 0.8]), 1, 4 * DEGREE)?.by).toBe('layers')
+  })
+})
+
+describe('a way outwards along a polar', () => {
+  it('goes on until no recovery counts, 4 deg behind the extreme', () => {
+    const points = pointsOf([0, 0.5, 1, 0.9, 0.8, 0.7, 0.6])
+    expect(isPastStall(points, 6 * DEGREE)).toBe(false)
+    expect(isPastStall(points, 6.5 * DEGREE)).toBe(true)
+  })
+
+  it('is given up after three angles without a solution, not after two', () => {
+    expect(isPastStall(pointsOf([0, 0.5, null, null]), 4 * DEGREE)).toBe(false)
+    expect(isPastStall(pointsOf([0, 0.5, null, null, null]), 5 * DEGREE)).toBe(true)
+  })
+
+  it('does not mind the other side', () => {
+    expect(isPastStall(pointsOf([0, 0.5, 1, 0.9, 0.8, 0.7, 0.6]), -0.5 * DEGREE)).toBe(false)
   })
 })
