@@ -54,3 +54,6 @@ export interface Polar {
 
 /** What a polar without boundary layers has to say of its ends. */
 export const NO_LIMITS = { between: [], maxLift: null, minLift: null } as const
+
+/** The reason of an angle that a sweep to the stall left out: nobody needs it, and nothing failed there. */
+export const PAST_STALL = 'past the stall or the last angles with a solution: not computed'

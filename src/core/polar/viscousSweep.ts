@@ -5,7 +5,7 @@ import { BadInput } from '../numerics/errors'
 import type { Section } from '../shape/section'
 import { isPastStall, liftLimit } from './liftLimits'
 import { noseLimits } from './noseSuction'
-import { NO_LIMITS, type Polar, type PolarPoint } from './polar'
+import { NO_LIMITS, PAST_STALL, type Polar, type PolarPoint } from './polar'
 import { refinementAngles } from './refine'
 import type { SectionState } from './state'
 import { solvePoint, solveSweep } from './viscousMarch'
@@ -19,8 +19,6 @@ export interface SweepExtent {
   /** Ends each way once the stall is sure (see liftLimits.ts); the points behind are empty and say so. */
   readonly toTheStall?: boolean
 }
-
-const PAST_STALL = 'past the stall or the last angles with a solution: not computed'
 
 /** What stands in the reason of a point beyond the nose's limit. */
 export const BEYOND_NOSE = 'beyond the suction peak that sections of this nose have been seen to hold'

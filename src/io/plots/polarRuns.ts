@@ -1,4 +1,4 @@
-import type { Comparison, LiftLimit, Polar, PolarPoint } from '../../core'
+import { PAST_STALL, type Comparison, type LiftLimit, type Polar, type PolarPoint } from '../../core'
 import { shownName } from '../entryName'
 import { plotNumber } from './axisTicks'
 import { DEGREES, type PlotFailure } from './plot'
@@ -20,7 +20,7 @@ export function polarRuns({ points, between }: Polar): PolarPoint[][] {
 export function polarFailures(comparison: Comparison, condition: number): PlotFailure[] {
   return comparison.entries.flatMap((entry, index) =>
     (entry.conditions[condition]?.pane?.polar?.points ?? [])
-      .filter((point) => !point.converged)
+      .filter(({ converged, reason }) => !converged && reason !== PAST_STALL)
       .map(({ alpha, reason }) => ({
         ...{ entry: index, name: shownName(entry.name), alpha },
         reason: reason || 'did not converge',
