@@ -26,7 +26,7 @@ vi.mock('../../src/core', () => ({
   },
 }))
 
-const job = {} as Job
+const job = { entries: [{}], conditions: [{}] } as unknown as Job
 
 /** A worker that answers after a while of its own, so that tasks end in another order than they began. */
 function slowWorker(delay: (name: string) => number): TaskWorker {

@@ -19,7 +19,7 @@ const TELL_EVERY_MS = 250
 
 const store = memoryStore(KEPT_RESULTS)
 let pool: Pool | null = null
-const poolOf = (): Pool => (pool ??= openPool(webWorker, Math.max(1, navigator.hardwareConcurrency - 1)))
+const poolOf = (): Pool => (pool ??= openPool(webWorker, navigator.hardwareConcurrency))
 
 const post = (message: DeskMessage): void => self.postMessage(message)
 
