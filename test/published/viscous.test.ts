@@ -24,11 +24,15 @@ describe('the viscous method against published measurements', { timeout: LONG },
   })
 
   it('gives moments at zero lift within 0.010', () => {
-    expect(errors('moment').worst).toBeLessThan(0.01)
+    const { missing, worst } = errors('moment')
+    expect(missing).toBe(0)
+    expect(worst).toBeLessThan(0.01)
   })
 
   it('gives lift slopes within 8 per cent', () => {
-    expect(errors('lift_slope').worst).toBeLessThan(0.08)
+    const { missing, worst } = errors('lift_slope')
+    expect(missing).toBe(0)
+    expect(worst).toBeLessThan(0.08)
   })
 
   it('gives maximum lift with a bias within 5 per cent, 6 per cent on the mean and 0.20 at worst', () => {
@@ -59,15 +63,19 @@ describe('the viscous method against published measurements', { timeout: LONG },
   })
 
   it('lays laminar separation 0.06 chord too far aft where 0.03 is aimed at, and reattachment within 0.08', () => {
-    // At 2e5 up to 5 deg; at 6 and 7 deg the computed bubble has gone where the oil shows one.
+    // At 2e5 up to 5 deg; beyond, the computed bubble has gone where the oil shows one.
     const at2e5 = (figure: Figure): Figure => ({
       ...figure,
-      rows: figure.rows.filter(({ name }) => name.startsWith('2e5') && !/, [67] deg/.test(name)),
+      rows: figure.rows.filter(({ name }) => name.startsWith('2e5') && !/, (6|7|8\.5) deg/.test(name)),
     })
-    expect(errorsOf(at2e5(figures['bubble_separation']!())).worst).toBeLessThan(0.06)
+    const separation = errorsOf(at2e5(figures['bubble_separation']!()))
+    expect(separation.missing).toBe(0)
+    expect(separation.worst).toBeLessThan(0.06)
     // Between the tunnels reattachment itself differs by up to 0.08 chord: the nearer tunnel counts.
     const mcGhee = at2e5(figures['bubble_reattachment']!())
     const rows = mcGhee.rows.filter(({ name }) => name.endsWith('McGhee'))
-    expect(errorsOf({ ...mcGhee, rows }).worst).toBeLessThan(0.08)
+    const reattachment = errorsOf({ ...mcGhee, rows })
+    expect(reattachment.missing).toBe(0)
+    expect(reattachment.worst).toBeLessThan(0.08)
   })
 })

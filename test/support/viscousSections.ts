@@ -54,6 +54,15 @@ function aftLoaded(): Section {
   )
 }
 
+/** A 12 % thick section whose mean line turns up behind 7/8 of the chord, for a moment near zero. */
+function reflexed(): Section {
+  const camber = (x: number): number => 0.12 * x * (1 - x) * (7 / 8 - x)
+  return fromPoints(
+    'reflexed',
+    pointsOf(nacaSection('0012')).map(([x, y]) => [x, y + camber(x)]),
+  )
+}
+
 /** NACA 4415 opened to an edge of 1 % of the chord. */
 function blunt(): Section {
   const points = pointsOf(nacaSection('4415'))
@@ -63,7 +72,7 @@ function blunt(): Section {
   )
 }
 
-/** Eight sections of different kind. */
+/** Nine sections of different kind. */
 export const matrixCases = (): readonly MatrixCase[] => [
   { name: 'thin 0008', section: nacaSection('0008'), from: -7, to: 8 },
   { name: 'common 2412', section: nacaSection('2412'), from: -8, to: 12 },
@@ -73,4 +82,5 @@ export const matrixCases = (): readonly MatrixCase[] => [
   { name: 'aft-loaded', section: aftLoaded(), from: -6, to: 10 },
   { name: 'noisy scan', section: noisy(), from: -8, to: 12 },
   { name: 'blunt edge', section: blunt(), from: -8, to: 12 },
+  { name: 'reflexed', section: reflexed(), from: -8, to: 12 },
 ]

@@ -113,35 +113,40 @@ export const LOW_REYNOLDS_AT_5_DEG: readonly {
   { reynolds: 2e5, mach: 0.06, alphaDeg: 5.06, lift: 0.897, drag: 0.0137, moment: -0.0802 },
 ]
 
-/** Bubble on the upper side: laminar separation and reattachment, x/c. */
+/** Bubble on the upper side, x/c: laminar separation, transition (null where oil does not show it), reattachment. */
 export interface Bubble {
   readonly reynolds: number
   readonly alphaDeg: number
   readonly separation: number
+  readonly transition: number | null
   readonly reattachment: number
   readonly tunnel: 'McGhee' | 'Cole'
 }
 
 export const BUBBLES: readonly Bubble[] = [
-  { reynolds: 2e5, alphaDeg: -2, separation: 0.53, reattachment: 0.8, tunnel: 'McGhee' },
-  { reynolds: 2e5, alphaDeg: 0, separation: 0.48, reattachment: 0.74, tunnel: 'McGhee' },
-  { reynolds: 2e5, alphaDeg: 2, separation: 0.43, reattachment: 0.67, tunnel: 'McGhee' },
-  { reynolds: 2e5, alphaDeg: 4, separation: 0.4, reattachment: 0.62, tunnel: 'McGhee' },
-  { reynolds: 2e5, alphaDeg: 5, separation: 0.38, reattachment: 0.59, tunnel: 'McGhee' },
-  { reynolds: 2e5, alphaDeg: 6, separation: 0.37, reattachment: 0.55, tunnel: 'McGhee' },
-  { reynolds: 2e5, alphaDeg: 7, separation: 0.33, reattachment: 0.48, tunnel: 'McGhee' },
-  { reynolds: 1e5, alphaDeg: 5, separation: 0.34, reattachment: 0.67, tunnel: 'McGhee' },
-  { reynolds: 1e5, alphaDeg: -2, separation: 0.5, reattachment: 0.98, tunnel: 'Cole' },
-  { reynolds: 1e5, alphaDeg: -1, separation: 0.48, reattachment: 0.9, tunnel: 'Cole' },
-  { reynolds: 1e5, alphaDeg: 0, separation: 0.44, reattachment: 0.9, tunnel: 'Cole' },
-  { reynolds: 1e5, alphaDeg: 1, separation: 0.46, reattachment: 0.85, tunnel: 'Cole' },
-  { reynolds: 1e5, alphaDeg: 2, separation: 0.4, reattachment: 0.85, tunnel: 'Cole' },
-  { reynolds: 1e5, alphaDeg: 4, separation: 0.38, reattachment: 0.78, tunnel: 'Cole' },
-  { reynolds: 1e5, alphaDeg: 6, separation: 0.38, reattachment: 0.68, tunnel: 'Cole' },
-  { reynolds: 1e5, alphaDeg: 7, separation: 0.28, reattachment: 0.54, tunnel: 'Cole' },
-  { reynolds: 1e5, alphaDeg: 2, separation: 0.395, reattachment: 0.805, tunnel: 'Cole' },
-  { reynolds: 2e5, alphaDeg: -2, separation: 0.54, reattachment: 0.88, tunnel: 'Cole' },
-  { reynolds: 2e5, alphaDeg: -1, separation: 0.54, reattachment: 0.8, tunnel: 'Cole' },
-  { reynolds: 2e5, alphaDeg: 1, separation: 0.44, reattachment: 0.74, tunnel: 'Cole' },
-  { reynolds: 2e5, alphaDeg: 3, separation: 0.4, reattachment: 0.68, tunnel: 'Cole' },
+  { reynolds: 2e5, alphaDeg: -2, separation: 0.53, transition: null, reattachment: 0.8, tunnel: 'McGhee' },
+  { reynolds: 2e5, alphaDeg: 0, separation: 0.48, transition: null, reattachment: 0.74, tunnel: 'McGhee' },
+  { reynolds: 2e5, alphaDeg: 2, separation: 0.43, transition: null, reattachment: 0.67, tunnel: 'McGhee' },
+  { reynolds: 2e5, alphaDeg: 4, separation: 0.4, transition: null, reattachment: 0.62, tunnel: 'McGhee' },
+  { reynolds: 2e5, alphaDeg: 5, separation: 0.38, transition: null, reattachment: 0.59, tunnel: 'McGhee' },
+  { reynolds: 2e5, alphaDeg: 6, separation: 0.37, transition: null, reattachment: 0.55, tunnel: 'McGhee' },
+  { reynolds: 2e5, alphaDeg: 7, separation: 0.33, transition: null, reattachment: 0.48, tunnel: 'McGhee' },
+  { reynolds: 2e5, alphaDeg: 8.5, separation: 0.03, transition: null, reattachment: 0.18, tunnel: 'McGhee' },
+  { reynolds: 1e5, alphaDeg: 5, separation: 0.34, transition: null, reattachment: 0.67, tunnel: 'McGhee' },
+  { reynolds: 1e5, alphaDeg: -2, separation: 0.5, transition: 0.9, reattachment: 0.98, tunnel: 'Cole' },
+  { reynolds: 1e5, alphaDeg: -1, separation: 0.48, transition: 0.85, reattachment: 0.9, tunnel: 'Cole' },
+  { reynolds: 1e5, alphaDeg: 0, separation: 0.44, transition: 0.85, reattachment: 0.9, tunnel: 'Cole' },
+  { reynolds: 1e5, alphaDeg: 1, separation: 0.46, transition: 0.8, reattachment: 0.85, tunnel: 'Cole' },
+  { reynolds: 1e5, alphaDeg: 2, separation: 0.4, transition: 0.76, reattachment: 0.85, tunnel: 'Cole' },
+  { reynolds: 1e5, alphaDeg: 4, separation: 0.38, transition: 0.68, reattachment: 0.78, tunnel: 'Cole' },
+  { reynolds: 1e5, alphaDeg: 6, separation: 0.38, transition: 0.6, reattachment: 0.68, tunnel: 'Cole' },
+  { reynolds: 1e5, alphaDeg: 7, separation: 0.28, transition: 0.44, reattachment: 0.54, tunnel: 'Cole' },
+  { reynolds: 1e5, alphaDeg: 8, separation: 0.28, transition: 0.44, reattachment: 0.52, tunnel: 'Cole' },
+  { reynolds: 1e5, alphaDeg: 9, separation: 0.02, transition: 0.06, reattachment: 0.1, tunnel: 'Cole' },
+  { reynolds: 1e5, alphaDeg: 10, separation: 0.005, transition: 0.06, reattachment: 0.08, tunnel: 'Cole' },
+  { reynolds: 1e5, alphaDeg: 2, separation: 0.395, transition: 0.76, reattachment: 0.805, tunnel: 'Cole' },
+  { reynolds: 2e5, alphaDeg: -2, separation: 0.54, transition: 0.82, reattachment: 0.88, tunnel: 'Cole' },
+  { reynolds: 2e5, alphaDeg: -1, separation: 0.54, transition: 0.76, reattachment: 0.8, tunnel: 'Cole' },
+  { reynolds: 2e5, alphaDeg: 1, separation: 0.44, transition: 0.7, reattachment: 0.74, tunnel: 'Cole' },
+  { reynolds: 2e5, alphaDeg: 3, separation: 0.4, transition: 0.64, reattachment: 0.68, tunnel: 'Cole' },
 ]

@@ -118,29 +118,30 @@ export function publishedFigures(): Readonly<Record<string, () => Figure>> {
       })),
     }),
     bubble_separation: () => bubbleFigure('separation', 'each within 0.03 chord at 2e5'),
+    bubble_transition: () => bubbleFigure('transition', 'none stated'),
     bubble_reattachment: () => bubbleFigure('reattachment', 'each within 0.08 chord at 2e5'),
   }
 }
 
 /** Bubbles on the upper side of the low-Reynolds-number section, at the angles of the tunnels. */
-function bubbleFigure(event: 'separation' | 'reattachment', aim: string): Figure {
+function bubbleFigure(event: 'separation' | 'transition' | 'reattachment', aim: string): Figure {
   const section = lowReynoldsSection()
   const known = new Map<string, PressureResult>()
   return {
     ...{ key: `bubble_${event}`, title: `Laminar bubble, upper side: ${event}, x/c` },
     ...{ kind: 'difference', decimals: 3, aim },
-    rows: BUBBLES.map((bubble) => {
+    rows: BUBBLES.flatMap((bubble) => {
       const { reynolds, alphaDeg, tunnel } = bubble
       const state = viscousState(reynolds, { mach: reynolds === 2e5 ? 0.06 : 0.03 })
       const key = `${reynolds} ${alphaDeg}`
       const result = known.get(key) ?? pressureAt(section, state, { alpha: alphaDeg * DEGREE })
       known.set(key, result)
       const upper = result.layers?.upper
-      return {
-        name: `${reynolds / 1e5}e5, ${alphaDeg} deg, ${tunnel}`,
-        computed: (event === 'separation' ? upper?.laminarSeparation : upper?.reattachment) ?? null,
-        published: bubble[event],
-      }
+      const published = bubble[event]
+      if (published === null) return []
+      const computed = event === 'separation' ? upper?.laminarSeparation : upper?.[event]
+      const name = `${reynolds / 1e5}e5, ${alphaDeg} deg, ${tunnel}`
+      return [{ name, computed: computed ?? null, published }]
     }),
   }
 }
