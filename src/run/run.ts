@@ -11,8 +11,8 @@ export interface Progress {
 export type Known = ReadonlyMap<string, TaskResult>
 
 /**
- * Computes all that a job needs. Each entry at each condition is a part of its own, so that its figures come
- * as soon as they can: the core names the tasks that it can name with what is known of the part; when all of
+ * Computes all that a job needs. With long tasks each entry is a part of its own, so that its figures come
+ * as soon as they can; short ones are done at one go. The core names the tasks that it can name with what is known of the part; when all of
  * them are done it is asked again, until it names none. Earlier parts go first. What a part asks for depends
  * only on its own results, so neither the number of workers nor the order in which they finish decides what
  * is computed. `onResult` is called after each result with all that is known; the map grows in place.
@@ -41,9 +41,7 @@ export async function run(
       await Promise.all([computed, ...theirs])
     }
   }
-  const parts = job.entries.flatMap((entry) =>
-    job.conditions.map((condition) => ({ ...job, entries: [entry], conditions: [condition] })),
-  )
+  const parts = job.method === 'viscous' ? job.entries.map((entry) => ({ ...job, entries: [entry] })) : [job]
   await Promise.all(parts.map(runPart))
   return known
 }

@@ -26,7 +26,7 @@ vi.mock('../../src/core', () => ({
   },
 }))
 
-const job = { entries: [{}], conditions: [{}] } as unknown as Job
+const job = { method: 'panel' } as unknown as Job
 
 /** A worker that answers after a while of its own, so that tasks end in another order than they began. */
 function slowWorker(delay: (name: string) => number): TaskWorker {
@@ -63,6 +63,18 @@ describe('a run', () => {
       [2, 2],
       [3, 3],
     ])
+  })
+
+  it('shares a task that several entries of a long job need', async () => {
+    const viscous = { method: 'viscous', entries: [{}, {}, {}] } as unknown as Job
+    core.rounds = [[longTask('a'), longTask('b')], [longTask('c')]]
+    const ran: string[] = []
+    const known = await run(
+      viscous,
+      options(2, (name) => (ran.push(name), name === 'a' ? 20 : 1)),
+    )
+    expect(ran.sort()).toEqual(['a', 'b', 'c'])
+    expect(known.size).toBe(3)
   })
 
   it('computes a task that is named twice once', async () => {
