@@ -239,7 +239,7 @@ describe('the window', () => {
     async () => {
       while ((await rows().count()) > 1)
         await page.getByRole('button', { name: 'Remove', exact: true }).last().click()
-      await chooseMethod(page, 'panels with boundary layers')
+      await chooseMethod(page, 'with boundary layers')
       await computed(page, VISCOUS_PATIENCE)
       for (const plot of ['pressure', 'lift', 'drag', 'moment']) {
         expect(await curvesIn(page, plot), plot).toBeGreaterThan(0)

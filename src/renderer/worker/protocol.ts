@@ -3,7 +3,7 @@ import type { Brief, BriefEntry } from '../../io/briefTypes'
 
 /** Methods that the window offers, the one that it begins with first. */
 export const METHODS: readonly { readonly method: Method; readonly words: string }[] = [
-  { method: 'viscous', words: 'panels with boundary layers' },
+  { method: 'viscous', words: 'with boundary layers' },
   { method: 'panel', words: 'panels, without boundary layers' },
   { method: 'thin', words: 'thin-airfoil theory' },
 ]
