@@ -38,7 +38,7 @@ describe('convergence of the viscous method', { timeout: LONG }, () => {
     }
     expect(failedInside / inside).toBeLessThanOrEqual(0.02)
     expect(failedBeyond / beyond).toBeLessThanOrEqual(0.1)
-    // All but one of 91 agree: beyond its range, at -9.5 deg, the blunt section has no solution from nothing.
+    // All but one of some hundred agree: beyond its range, at -9.5 deg, the blunt section has no solution from nothing.
     expect(disagreements.length, disagreements.join('\n')).toBeLessThanOrEqual(1)
   })
 })

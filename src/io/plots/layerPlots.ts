@@ -25,7 +25,7 @@ const KINDS: readonly Kind[] = [
     y: { label: 'friction c_f', symbol: 'c_f', unit: '', decimals: 5 },
   },
   {
-    ...{ key: 'amplification', title: 'Amplification exponent', read: (layer) => layer.amplification },
+    ...{ key: 'amplification', title: 'Amplification', read: (layer) => layer.amplification },
     y: { label: 'exponent N', symbol: 'N', unit: '', decimals: 1, from: 0 },
   },
 ]

@@ -21,11 +21,6 @@ export const COLUMNS: readonly Column[] = [
     value: (entry) => scaled(entry.root?.measures.maxThickness, 100),
   },
   {
-    ...{ key: 'camber', title: 'Camber', unit: '%', digits: 1 },
-    help: 'Largest camber of the root section, of its chord',
-    value: (entry) => scaled(entry.root?.measures.maxCamber, 100),
-  },
-  {
     ...{ key: 'sparDepth', title: 'Spar depth, root', unit: 'mm', digits: 1 },
     help: 'Depth at the spar at the root, less the skin on both sides',
     value: (entry, { wing }) => {
