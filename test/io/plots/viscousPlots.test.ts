@@ -1,9 +1,15 @@
 import { describe, expect, it } from 'vitest'
-import type { Comparison, Polar, PolarPoint, PressureResult } from '../../../src/core'
+import {
+  PAST_STALL,
+  type Comparison,
+  type Polar,
+  type PolarPoint,
+  type PressureResult,
+} from '../../../src/core'
 import { layerEvents } from '../../../src/io/plots/layerEvents'
 import { layerPlots } from '../../../src/io/plots/layerPlots'
 import { polarPlots } from '../../../src/io/plots/polarPlots'
-import { failureWords, polarFailures, polarRuns } from '../../../src/io/plots/polarRuns'
+import { failureWords, limitWords, polarFailures, polarRuns } from '../../../src/io/plots/polarRuns'
 import { pressurePlot } from '../../../src/io/plots/pressurePlot'
 import { comparisonOf, MAPPING } from '../../support/comparisons'
 import { inventedLayers, withPane } from '../../support/viscousPanes'
@@ -12,12 +18,17 @@ const DEGREE = Math.PI / 180
 const panel = comparisonOf()
 
 /** A polar with invented drag and transition; angles in `failed` (deg) have no result. */
-function viscous(polar: Polar, failed: readonly number[], between: readonly PolarPoint[] = []): Polar {
+function viscous(
+  polar: Polar,
+  failed: readonly number[],
+  between: readonly PolarPoint[] = [],
+  reason = 'the residual stays at 3e-3',
+): Polar {
   const points = polar.points.map((point): PolarPoint => {
     const deg = Math.round((2 * point.alpha) / DEGREE) / 2
     if (failed.includes(deg)) {
       return {
-        ...{ alpha: point.alpha, converged: false, reason: 'the residual stays at 3e-3' },
+        ...{ alpha: point.alpha, converged: false, reason },
         ...{ liftCoefficient: null, dragCoefficient: null, momentCoefficient: null },
         ...{ transitionUpper: null, transitionLower: null },
       }
@@ -91,10 +102,41 @@ describe('polars with drag', () => {
     )
   })
 
+  it('end past stall without calling it a failure, while a real failure stays named', () => {
+    const past = withPane(panel, (pane) => ({
+      ...pane,
+      polar: viscous(pane.polar!, [19.5, 20], [], PAST_STALL),
+    }))
+    expect(polarFailures(past, MAPPING)).toEqual([])
+    expect(polarFailures(shown([19.5, 20]), MAPPING)).toHaveLength(4)
+    const { states } = plotOf(past, 'lift').curves[0]!
+    expect(Math.max(...states.map(({ alpha }) => alpha!)) / DEGREE).toBeCloseTo(19, 9)
+  })
+
+  it('tell a lift that separation ends from one that the nose ends, and the least from the greatest', () => {
+    const limit = { alpha: -12 * DEGREE, liftCoefficient: -0.9, by: 'layers' } as const
+    expect(limitWords(limit, false)).toMatch(/^least lift .*limited by separation of the boundary layers$/)
+    expect(limitWords({ ...limit, by: 'nose' }, true)).toMatch(/^greatest lift .*suction peak of the nose$/)
+  })
+
   it('mark the greatest lift and say what limits it', () => {
     const [end] = plotOf(shown([]), 'lift').ends!
     expect([end!.x, end!.y]).toEqual([expect.closeTo(15, 9), 1.4])
     expect(end!.words).toContain('limited by the suction peak of the nose')
+  })
+})
+
+describe('the axis of pressure', () => {
+  it('holds a stagnation value above 1, and ends at 1 below it', () => {
+    const scaled = (highest: number): Comparison =>
+      withPane(panel, (pane) => {
+        const pressure = pane.pressure!
+        const most = Math.max(...pressure.pressureCoefficient)
+        const pressureCoefficient = pressure.pressureCoefficient.map((value) => (value * highest) / most)
+        return { ...pane, pressure: { ...pressure, pressureCoefficient } }
+      })
+    expect(pressurePlot(scaled(1.0225), MAPPING).y.to).toBeGreaterThan(1.0225)
+    expect(pressurePlot(scaled(0.98), MAPPING).y.to).toBe(1)
   })
 })
 
