@@ -53,20 +53,33 @@ export interface StationDrag {
   readonly reason: string
 }
 
-/** Section drag at a share of the semispan from the polars at the local Reynolds number and lift. */
+/**
+ * Section drag at a share of the semispan from the polars at the local Reynolds number and lift. Between two
+ * sections one may be asked for a little more than its own maximum while the station is not past its own:
+ * it counts with the drag at its maximum.
+ */
 export function dragOfStation(sections: WingSections, share: number, station: StationState): StationDrag {
   const { families } = sections
-  const a = dragOf(families.root, sections, station)
-  if (families.tip === families.root) return a
-  const b = dragOf(families.tip, sections, station)
+  if (families.tip === families.root) return dragOf(families.root, sections, station, Infinity)
+  const most = maxLiftOfStation(sections, share, station.reynolds)
+  const within = most !== null && station.liftCoefficient <= most
+  const limit = (family: PolarFamily): number =>
+    within ? (maxLiftAt(family, station.reynolds, sections.mach) ?? Infinity) : Infinity
+  const a = dragOf(families.root, sections, station, limit(families.root))
+  const b = dragOf(families.tip, sections, station, limit(families.tip))
   return { value: mixed(a.value, b.value, share), reason: a.reason || b.reason }
 }
 
-function dragOf(family: PolarFamily, { mach, sweep }: WingSections, station: StationState): StationDrag {
+function dragOf(
+  family: PolarFamily,
+  { mach, sweep }: WingSections,
+  station: StationState,
+  most: number,
+): StationDrag {
   const found = polarAt(family, station.reynolds, mach)
   if (found === null) return { value: null, reason: 'a polar is not computed' }
   if (found.outside) return { value: null, reason: 'the Reynolds or Mach number is outside the polars' }
-  const looked = atLift(found.polar, station.liftCoefficient / sweptLift(1, sweep))
+  const looked = atLift(found.polar, Math.min(station.liftCoefficient / sweptLift(1, sweep), most))
   if (looked.kind === 'failed') {
     return { value: null, reason: `a point of the polar did not converge (${looked.reason})` }
   }

@@ -103,6 +103,20 @@ describe('a wing with viscous polars', () => {
     expect(slowest(wingOf(constant, 25))).toBeCloseTo(speed, 8)
   })
 
+  it('has profile drag up to first stall where root and tip stall at different lift', () => {
+    const weak: InventedSection = { ...constant, maxLift: () => 1.2 }
+    const families = { root: familyOf(constant), tip: familyOf(weak) }
+    const input = wingOf(constant, 25, { families })
+    const speed = slowest({ ...input, condition: { ...input.condition, speed: 18 } })
+    const atStall = wingAt({ ...input, condition: { ...input.condition, speed } })
+    // Near the stall the station lies between: more than the tip section alone would carry.
+    expect(Math.max(...atStall.stations.map(({ liftCoefficient }) => liftCoefficient))).toBeGreaterThan(1.2)
+    expect(atStall.profileDragCoefficient).not.toBeNull()
+    const slower = wingAt({ ...input, condition: { ...input.condition, speed: 0.95 * speed } })
+    expect(slower.profileDragCoefficient).toBeNull()
+    expect(slower.missing.join()).toMatch(/beyond the stall/)
+  })
+
   it('keeps a tip margin: the smallest over the outer 40 % at first stall', () => {
     const wing = wingAt(wingOf(constant, 25))
     const scale = wing.maxLiftCoefficient! / wing.liftCoefficient
