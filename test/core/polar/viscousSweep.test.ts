@@ -29,7 +29,7 @@ describe('a viscous sweep', { timeout: 120_000 }, () => {
         const part = polarOf(code, state, angles(from, to))
         part.points.forEach((point, i) => {
           const same = up.points[from + 4 + i]!
-          if (!point.converged || !same.converged) return
+          expect([point.converged, same.converged]).toEqual([true, true])
           expect(Math.abs(point.dragCoefficient! / same.dragCoefficient! - 1)).toBeLessThan(0.005)
         })
       }
@@ -68,6 +68,8 @@ describe('a viscous sweep', { timeout: 120_000 }, () => {
     expect(worst('2412', 1e6, 0, 8)).toBeLessThan(0.015)
     // Missed: at 7 deg one point lies on another branch, 0.02 low in lift and 6 per cent high in drag.
     expect(worst('0012', 1e6, 0, 8)).toBeLessThan(0.045)
+    // Missed most: one point of the five-digit section lies 0.05 off its neighbours, at little change of drag.
+    expect(worst('23015', 1e6, -8, -6)).toBeLessThan(0.11)
   })
 
   it('moves by less than 2 per cent from 180 to 270 panels', () => {
@@ -88,21 +90,26 @@ describe('a viscous sweep', { timeout: 120_000 }, () => {
     }
   })
 
-  it('has as much drag in the wake as friction and pressure make on the surface, closer with more panels', () => {
-    // Aim 0.0010 for lift up to 0.8: NACA 2412 meets it, the thicker and more cambered 4415 comes to 0.0013.
-    const missOf = (code: string, panels: number): number =>
+  it('has less drag on the surface than in the wake, by more than is aimed at away from zero lift, closer with more panels', () => {
+    // Aim for lift from -0.8 to 0.8: 0.0010 or a tenth of the drag. Missed: NACA 2412 meets it from -4 to 2 deg only.
+    const missOf = (code: string, panels: number, alphas: readonly number[]): number =>
       Math.max(
-        ...[-2, 0, 2].map((alpha) => {
+        ...alphas.map((alpha) => {
           const state = { ...viscousState(3e6), panels }
-          const { layers, liftCoefficient } = pressureAt(nacaSection(code), state, { alpha: alpha * DEGREE })
+          const section = nacaSection(code)
+          const { converged, layers, liftCoefficient } = pressureAt(section, state, { alpha: alpha * DEGREE })
+          expect(converged).toBe(true)
           expect(Math.abs(liftCoefficient)).toBeLessThan(0.8)
           return Math.abs(layers!.frictionDrag + layers!.pressureDrag - layers!.dragCoefficient)
         }),
       )
-    expect(missOf('2412', 180)).toBeLessThan(0.001)
-    expect(missOf('4415', 180)).toBeLessThan(0.0014)
+    expect(missOf('2412', 180, [-4, -2, 0, 2])).toBeLessThan(0.001)
+    // Over the whole range of lift: 0.0016 for 2412 and 4415, 0.0032 for the thick 2421.
+    expect(missOf('2412', 180, [-8, -4, 4])).toBeLessThan(0.0018)
+    expect(missOf('4415', 180, [-8, -4, 2])).toBeLessThan(0.0018)
+    expect(missOf('2421', 180, [-8, -4, 2, 6])).toBeLessThan(0.0035)
     for (const code of ['2412', '4415']) {
-      const misses = [120, 180, 270].map((panels) => missOf(code, panels))
+      const misses = [120, 180, 270].map((panels) => missOf(code, panels, [-8, -2, 0, 2]))
       expect(misses[1]).toBeLessThan(misses[0]!)
       expect(misses[2]).toBeLessThan(misses[1]!)
     }
